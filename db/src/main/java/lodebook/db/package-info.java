@@ -1,0 +1,5 @@
+/// db
+@NullMarked
+package lodebook.db;
+
+import org.jspecify.annotations.NullMarked;

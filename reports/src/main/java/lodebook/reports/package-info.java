@@ -1,0 +1,5 @@
+/// reports
+@NullMarked
+package lodebook.reports;
+
+import org.jspecify.annotations.NullMarked;
