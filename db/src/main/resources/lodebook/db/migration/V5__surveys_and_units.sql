@@ -14,37 +14,65 @@ create table survey (
 );
 create index ix_survey_rotor on survey (rotor_id);
 
--- Each reading has its own person and meter; radius and height are those at which it was taken.
+-- What was done to a survey after it was taken in: declared void, or moved from the rotor under which it
+-- was entered by mistake.
+create table survey_change (
+  id bigint not null,
+  survey_id bigint not null,
+  kind varchar(20) not null,
+  from_rotor_id bigint not null,
+  to_rotor_id bigint not null,
+  why varchar(1000) not null,
+  person_id bigint not null,
+  stated_at timestamp(6) with time zone not null,
+  recorded_at timestamp(6) with time zone not null,
+  history_sequence bigint not null,
+  constraint pk_survey_change primary key (id),
+  constraint fk_survey_change_survey foreign key (survey_id) references survey (id),
+  constraint fk_survey_change_from foreign key (from_rotor_id) references rotor (id),
+  constraint fk_survey_change_to foreign key (to_rotor_id) references rotor (id),
+  constraint fk_survey_change_person foreign key (person_id) references person (id),
+  constraint ck_survey_change_kind check (kind in ('void', 'move'))
+);
+create index ix_survey_change_survey on survey_change (survey_id);
+
+-- Each reading has its own person and meter. number: its place among the survey's readings, in the order
+-- in which they came; unit: the one in which it was stated; no radius or height: the layout's probe.
 create table reading (
   id bigint not null,
   survey_id bigint not null,
+  number bigint not null,
   slot bigint not null,
   spot varchar(20) not null,
   component varchar(20) not null,
   flux_tesla double precision not null,
+  unit varchar(5) not null,
   temperature_celsius double precision,
-  radius_metres double precision not null,
-  height_metres double precision not null,
+  radius_metres double precision,
+  height_metres double precision,
   meter_id bigint not null,
   person_id bigint not null,
-  voided boolean not null,
   stated_at timestamp(6) with time zone not null,
   recorded_at timestamp(6) with time zone not null,
   history_sequence bigint not null,
   constraint pk_reading primary key (id),
+  constraint uq_reading_number unique (survey_id, number),
   constraint fk_reading_survey foreign key (survey_id) references survey (id),
   constraint fk_reading_meter foreign key (meter_id) references meter (id),
   constraint fk_reading_person foreign key (person_id) references person (id),
-  constraint ck_reading_words check (slot > 0 and spot in ('centre', 'to-next') and component in ('radial', 'tangential'))
+  constraint ck_reading_words check (slot > 0 and spot in ('centre', 'to-next') and component in ('radial', 'tangential')
+    and unit in ('mT', 'T', 'G', 'kG'))
 );
-create index ix_reading_survey on reading (survey_id);
 
--- What a check of a survey said when it was made; the latest of a survey counts.
+-- What a check of a survey said when it was made; the latest of a survey counts, as long as neither
+-- readings nor placements changed after it.
 create table survey_check (
   id bigint not null,
   survey_id bigint not null,
   verdict varchar(20) not null,
+  reason varchar(40) not null,
   measuring varchar(400) not null,
+  fit_probability double precision not null,
   person_id bigint not null,
   recorded_at timestamp(6) with time zone not null,
   history_sequence bigint not null,
@@ -57,13 +85,15 @@ create index ix_survey_check_survey on survey_check (survey_id);
 
 create table finding (
   survey_check_id bigint not null,
+  number bigint not null,
   slot bigint not null,
   kind varchar(40) not null,
   should_face_degrees double precision,
   faces_degrees double precision,
+  by_degrees double precision,
   strength_relative double precision,
   probability double precision,
-  constraint pk_finding primary key (survey_check_id, slot, kind),
+  constraint pk_finding primary key (survey_check_id, number),
   constraint fk_finding_check foreign key (survey_check_id) references survey_check (id)
 );
 
