@@ -1,0 +1,154 @@
+package lodebook.assembly.plan;
+
+import java.util.Comparator;
+import java.util.SplittableRandom;
+import java.util.concurrent.atomic.AtomicLong;
+import java.util.stream.IntStream;
+
+/// Searches a puzzle by simulated annealing from several random orders, each ended by exchanging
+/// until no single exchange helps.
+///
+/// Source of the method: Kirkpatrick, Gelatt and Vecchi 1983, Science 220, 671. The runs share
+/// nothing but the seed, so their number of processors does not change the result.
+final class Annealing {
+  private static final int BETWEEN_QUESTIONS = 4096;
+  private static final int LOGARITHMS = 4096;
+
+  private final Puzzle puzzle;
+  private final long seed;
+  private final Effort effort;
+  private final double[] logarithms = new double[LOGARITHMS];
+  private final AtomicLong best = new AtomicLong(Double.doubleToLongBits(Double.MAX_VALUE));
+
+  Annealing(Puzzle puzzle, long seed, Effort effort) {
+    this.puzzle = puzzle;
+    this.seed = seed;
+    this.effort = effort;
+    for (int i = 0; i < LOGARITHMS; i++) {
+      logarithms[i] = -Math.log((i + 0.5) / LOGARITHMS);
+    }
+  }
+
+  /// The best order of one run.
+  private static final class Found {
+    final int[] order;
+    final double cost;
+
+    Found(Trial trial) {
+      order = trial.order();
+      cost = trial.cost();
+    }
+  }
+
+  /// The best order found; as they come where nothing can move.
+  int[] search() {
+    if (puzzle.movable.length == 0) {
+      return puzzle.asTheyCome();
+    }
+    int runs = runs();
+    return IntStream.range(0, runs)
+        .parallel()
+        .mapToObj(run -> anneal(run, effort.steps() / runs))
+        .min(Comparator.comparingDouble(found -> found.cost))
+        .orElseThrow()
+        .order;
+  }
+
+  private int runs() {
+    long each = 40_000L * puzzle.movable.length;
+    return Math.clamp(effort.steps() / each, 2, 1000);
+  }
+
+  private Found anneal(int run, long steps) {
+    SplittableRandom random = new SplittableRandom(seed * 1_000_003 + run);
+    Trial trial = new Trial(puzzle, shuffled(random));
+    double hot = typicalChange(trial, random);
+    double factor = Math.pow(1e-4, (double) BETWEEN_QUESTIONS / Math.max(BETWEEN_QUESTIONS, steps));
+    double temperature = hot;
+    Found kept = new Found(trial);
+    for (long done = 0; done < steps && effort.keepGoing().getAsBoolean(); ) {
+      long until = Math.min(steps, done + BETWEEN_QUESTIONS);
+      for (; done < until; done++) {
+        tryOne(trial, random, temperature);
+      }
+      temperature *= factor;
+      trial.refresh();
+      if (trial.cost() < kept.cost) {
+        kept = new Found(trial);
+      }
+    }
+    trial.restart(kept.order);
+    descend(trial);
+    tell(trial.cost());
+    return new Found(trial);
+  }
+
+  private void tryOne(Trial trial, SplittableRandom random, double temperature) {
+    int slot = puzzle.movable[random.nextInt(puzzle.movable.length)];
+    int[] pool = puzzle.pools[puzzle.poolOf[slot]];
+    int other = pool[random.nextInt(pool.length)];
+    if (other != slot) {
+      double rise = trial.costWith(slot, other) - trial.cost();
+      if (rise <= 0 || rise < temperature * logarithms[random.nextInt(LOGARITHMS)]) {
+        trial.exchange(slot, other);
+      }
+    }
+  }
+
+  private double typicalChange(Trial trial, SplittableRandom random) {
+    double sum = 0;
+    int tries = 200;
+    for (int i = 0; i < tries; i++) {
+      int slot = puzzle.movable[random.nextInt(puzzle.movable.length)];
+      int[] pool = puzzle.pools[puzzle.poolOf[slot]];
+      int other = pool[random.nextInt(pool.length)];
+      if (other != slot) {
+        sum += Math.abs(trial.costWith(slot, other) - trial.cost());
+      }
+    }
+    return Math.max(sum / tries, Double.MIN_NORMAL);
+  }
+
+  /// Makes the best single exchange until none helps.
+  private void descend(Trial trial) {
+    boolean better = true;
+    while (better) {
+      better = false;
+      for (int slot : puzzle.movable) {
+        int bestOther = -1;
+        double bestCost = trial.cost() * (1 - 1e-12);
+        for (int other : puzzle.pools[puzzle.poolOf[slot]]) {
+          double cost = other == slot ? Double.MAX_VALUE : trial.costWith(slot, other);
+          if (cost < bestCost) {
+            bestCost = cost;
+            bestOther = other;
+          }
+        }
+        if (bestOther >= 0) {
+          trial.exchange(slot, bestOther);
+          better = true;
+        }
+      }
+    }
+  }
+
+  private int[] shuffled(SplittableRandom random) {
+    int[] order = puzzle.asTheyCome();
+    for (int[] pool : puzzle.pools) {
+      for (int i = pool.length - 1; i > 0; i--) {
+        int j = random.nextInt(i + 1);
+        int piece = order[pool[i]];
+        order[pool[i]] = order[pool[j]];
+        order[pool[j]] = piece;
+      }
+    }
+    return order;
+  }
+
+  private void tell(double cost) {
+    long bits = Double.doubleToLongBits(Math.max(0, cost));
+    if (best.accumulateAndGet(bits, Math::min) == bits) {
+      effort.bestSoFar().accept(Math.sqrt(Math.max(0, cost)));
+    }
+  }
+}

@@ -1,0 +1,131 @@
+package lodebook.assembly.plan;
+
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
+
+/// Plans one rotor: facings by the rule, pieces so that the unwanted harmonics are least while the
+/// working amplitude stays within the layout's tolerance.
+public final class RotorPlanner {
+  private final RotorTask task;
+  private final HarmonicForm form;
+  private final double target;
+
+  /// @param task what is asked
+  /// @param asPlaced harmonics of the task's ring, kept magnets facing as they were built
+  /// @param byRule harmonics of the same ring with every facing by the rule
+  public RotorPlanner(RotorTask task, RingHarmonics asPlaced, RingHarmonics byRule) {
+    this.task = task;
+    int[] pool = new int[task.layout().slots()];
+    Arrays.setAll(pool, i -> task.types().indexOf(task.layout().typeAt(i + 1)));
+    form = HarmonicForm.of(asPlaced, byRule, pool);
+    Double wanted = task.targetAmplitudeTesla();
+    target =
+        wanted != null
+            ? wanted
+            : HarmonicForm.of(byRule, byRule, pool).workingAmplitude(meanStrengths());
+  }
+
+  /// What is short before anything can be planned, type by type.
+  public static List<Shortage> shortages(RotorTask task) {
+    return new LotChoice(task).shortages();
+  }
+
+  /// The best plan found.
+  ///
+  /// @param seed the same seed gives the same plan
+  /// @param effort how long to search
+  /// @throws IllegalArgumentException where pieces are short; see [#shortages(RotorTask)]
+  public RotorPlan plan(long seed, Effort effort) {
+    LotChoice choice = new LotChoice(task);
+    if (!choice.shortages().isEmpty()) {
+      throw new IllegalArgumentException(
+          "pieces are short for " + task.layout().name() + ": " + choice.shortages());
+    }
+    Stocked stocked = chosen(choice.sets(), seed, effort);
+    Puzzle puzzle = stocked.puzzle();
+    int[] best = new Annealing(puzzle, seed, effort).search();
+    List<Placement> placements = stocked.placements(best);
+    double amplitude = form.workingAmplitude(puzzle.inSlots(best));
+    return new RotorPlan(
+        placements,
+        seed,
+        puzzle.unwanted(best),
+        null,
+        puzzle.unwanted(puzzle.asTheyCome()),
+        amplitude,
+        target,
+        Math.abs(amplitude / target - 1) <= task.layout().workingAmplitudeTolerance() + 1e-12,
+        Stocked.lotsOf(placements),
+        freelyMixed(placements, seed, effort));
+  }
+
+  private Stocked chosen(List<Set<String>> sets, long seed, Effort effort) {
+    List<Stocked> each = sets.stream().map(lots -> new Stocked(task, form, lots, target)).toList();
+    if (each.size() == 1) {
+      return each.getFirst();
+    }
+    Effort quick = new Effort(effort.steps() / 10 / each.size() + 1, effort.keepGoing(), r -> {});
+    double[] costs =
+        each.stream()
+            .map(Stocked::puzzle)
+            .mapToDouble(puzzle -> puzzle.cost(new Annealing(puzzle, seed, quick).search()))
+            .toArray();
+    return each.get(
+        IntStream.range(0, costs.length)
+            .boxed()
+            .min(Comparator.comparingDouble(i -> costs[i]))
+            .orElseThrow());
+  }
+
+  private @Nullable Double freelyMixed(List<Placement> placements, long seed, Effort effort) {
+    Set<String> offered =
+        Stream.concat(
+                task.candidates().stream().map(Candidate::lot),
+                task.unmeasured().stream().map(LotSupply::lot))
+            .collect(Collectors.toCollection(HashSet::new));
+    offered.removeAll(Stocked.lotsOf(placements));
+    if (task.mix() == MixPolicy.FREE || offered.isEmpty()) {
+      return null;
+    }
+    Set<String> all = new LotChoice(task.withMix(MixPolicy.FREE)).sets().getFirst();
+    Puzzle free = new Stocked(task, form, all, target).puzzle();
+    Effort quick = new Effort(effort.steps() / 4 + 1, effort.keepGoing(), ratio -> {});
+    return free.unwanted(new Annealing(free, seed, quick).search());
+  }
+
+  private double[] meanStrengths() {
+    double[] means = new double[task.layout().slots()];
+    for (String type : task.types()) {
+      double sum = 0;
+      double count = 0;
+      for (Candidate each : task.candidates()) {
+        if (each.type().equals(type)) {
+          sum += each.strength().remanenceTesla();
+          count++;
+        }
+      }
+      for (LotSupply each : task.unmeasured()) {
+        if (each.type().equals(type)) {
+          sum += each.count() * each.strength().remanenceTesla();
+          count += each.count();
+        }
+      }
+      for (Kept each : task.kept()) {
+        if (task.layout().typeAt(each.slot()).equals(type)) {
+          sum += each.strength().remanenceTesla();
+          count++;
+        }
+      }
+      double mean = sum / Math.max(1, count);
+      Arrays.setAll(means, i -> task.layout().typeAt(i + 1).equals(type) ? mean : means[i]);
+    }
+    return means;
+  }
+}
