@@ -1,5 +1,6 @@
 package lodebook.assembly.plan;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.HashSet;
@@ -8,6 +9,8 @@ import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import lodebook.assembly.layout.Facing;
+import lodebook.assembly.layout.RingDesign;
 import org.jspecify.annotations.Nullable;
 
 /// Plans one rotor: facings by the rule, pieces so that the unwanted harmonics are least while the
@@ -15,7 +18,21 @@ import org.jspecify.annotations.Nullable;
 public final class RotorPlanner {
   private final RotorTask task;
   private final HarmonicForm form;
-  private final double target;
+  private final HarmonicForm ideal;
+
+  /// A planner for a task's ring.
+  ///
+  /// @param design the ring's layout with its magnet types
+  /// @param task what is asked of that layout
+  public static RotorPlanner of(RingDesign design, RotorTask task) {
+    RingHarmonics byRule = RingHarmonics.of(design, design.ruleFacings());
+    if (task.kept().isEmpty()) {
+      return new RotorPlanner(task, byRule, byRule);
+    }
+    List<Facing> facings = new ArrayList<>(design.ruleFacings());
+    task.kept().forEach(kept -> facings.set(kept.slot() - 1, kept.facing()));
+    return new RotorPlanner(task, RingHarmonics.of(design, facings), byRule);
+  }
 
   /// @param task what is asked
   /// @param asPlaced harmonics of the task's ring, kept magnets facing as they were built
@@ -25,11 +42,7 @@ public final class RotorPlanner {
     int[] pool = new int[task.layout().slots()];
     Arrays.setAll(pool, i -> task.types().indexOf(task.layout().typeAt(i + 1)));
     form = HarmonicForm.of(asPlaced, byRule, pool);
-    Double wanted = task.targetAmplitudeTesla();
-    target =
-        wanted != null
-            ? wanted
-            : HarmonicForm.of(byRule, byRule, pool).workingAmplitude(meanStrengths());
+    ideal = HarmonicForm.of(byRule, byRule, pool);
   }
 
   /// What is short before anything can be planned, type by type.
@@ -53,6 +66,7 @@ public final class RotorPlanner {
     int[] best = new Annealing(puzzle, seed, effort).search();
     List<Placement> placements = stocked.placements(best);
     double amplitude = form.workingAmplitude(puzzle.inSlots(best));
+    double target = 2 * puzzle.target;
     return new RotorPlan(
         placements,
         seed,
@@ -67,7 +81,7 @@ public final class RotorPlanner {
   }
 
   private Stocked chosen(List<Set<String>> sets, long seed, Effort effort) {
-    List<Stocked> each = sets.stream().map(lots -> new Stocked(task, form, lots, target)).toList();
+    List<Stocked> each = sets.stream().map(this::stocked).toList();
     if (each.size() == 1) {
       return each.getFirst();
     }
@@ -95,24 +109,31 @@ public final class RotorPlanner {
       return null;
     }
     Set<String> all = new LotChoice(task.withMix(MixPolicy.FREE)).sets().getFirst();
-    Puzzle free = new Stocked(task, form, all, target).puzzle();
+    Puzzle free = stocked(all).puzzle();
     Effort quick = new Effort(effort.steps() / 4 + 1, effort.keepGoing(), ratio -> {});
     return free.unwanted(new Annealing(free, seed, quick).search());
   }
 
-  private double[] meanStrengths() {
+  private Stocked stocked(Set<String> lots) {
+    Double wanted = task.targetAmplitudeTesla();
+    return new Stocked(
+        task, form, lots, wanted != null ? wanted : ideal.workingAmplitude(meanStrengths(lots)));
+  }
+
+  /// For each slot the mean strength of what may be used there, of some lots, or is kept.
+  private double[] meanStrengths(Set<String> lots) {
     double[] means = new double[task.layout().slots()];
     for (String type : task.types()) {
       double sum = 0;
       double count = 0;
       for (Candidate each : task.candidates()) {
-        if (each.type().equals(type)) {
+        if (each.type().equals(type) && lots.contains(each.lot())) {
           sum += each.strength().remanenceTesla();
           count++;
         }
       }
       for (LotSupply each : task.unmeasured()) {
-        if (each.type().equals(type)) {
+        if (each.type().equals(type) && lots.contains(each.lot())) {
           sum += each.count() * each.strength().remanenceTesla();
           count += each.count();
         }

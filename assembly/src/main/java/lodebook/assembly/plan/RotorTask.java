@@ -16,7 +16,7 @@ import org.jspecify.annotations.Nullable;
 /// @param kept slots that are filled and stay
 /// @param mix which lots may go together
 /// @param targetAmplitudeTesla wanted working amplitude; null for that of a ring by the rule with
-///   the mean strengths of everything that may be used or is kept
+///   the mean strengths of the lots drawn from and of what is kept
 public record RotorTask(
     Layout layout,
     List<Candidate> candidates,
