@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.book;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db;
+
+import org.jspecify.annotations.NullMarked;
