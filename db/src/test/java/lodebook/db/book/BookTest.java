@@ -27,7 +27,8 @@ class BookTest {
                   sql.select(HISTORY.CONTENT)
                       .from(HISTORY)
                       .where(HISTORY.SEQUENCE.eq(1L))
-                      .fetchSingle(HISTORY.CONTENT));
+                      .fetchSingle()
+                      .value1());
       assertEquals(
           """
           1
