@@ -1,4 +1,4 @@
-/// reports
+/// Paper and pictures: values in, bytes out; no query and no clock.
 @NullMarked
 package lodebook.reports;
 

@@ -1,0 +1,5 @@
+/// Pages with head and foot, flowing text, tables that break well, archival PDF.
+@NullMarked
+package lodebook.reports.sheet;
+
+import org.jspecify.annotations.NullMarked;
