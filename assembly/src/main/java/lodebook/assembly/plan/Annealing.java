@@ -5,8 +5,8 @@ import java.util.SplittableRandom;
 import java.util.concurrent.atomic.AtomicLong;
 import java.util.stream.IntStream;
 
-/// Searches a puzzle by simulated annealing from several random orders, each ended by exchanging
-/// until no single exchange helps.
+/// Searches a puzzle by simulated annealing, half of the runs from random orders and half, less
+/// hot, from neighbours in strength; each is ended by exchanging until no single exchange helps.
 ///
 /// Source of the method: Kirkpatrick, Gelatt and Vecchi 1983, Science 220, 671. The runs share
 /// nothing but the seed, so their number of processors does not change the result.
@@ -14,14 +14,20 @@ final class Annealing {
   private static final int BETWEEN_QUESTIONS = 4096;
   private static final int LOGARITHMS = 4096;
 
+  /// Share of the first temperature at which a start from neighbours is not undone.
+  private static final double COOLER = 0.1;
+
   private final Puzzle puzzle;
+  private final Start start;
   private final long seed;
   private final Effort effort;
   private final double[] logarithms = new double[LOGARITHMS];
   private final AtomicLong best = new AtomicLong(Double.doubleToLongBits(Double.MAX_VALUE));
 
-  Annealing(Puzzle puzzle, long seed, Effort effort) {
+  /// @param classes classes of slots that should be alike, for runs that begin with neighbours
+  Annealing(Puzzle puzzle, HarmlessClasses classes, long seed, Effort effort) {
     this.puzzle = puzzle;
+    this.start = new Start(puzzle, classes);
     this.seed = seed;
     this.effort = effort;
     for (int i = 0; i < LOGARITHMS; i++) {
@@ -61,8 +67,9 @@ final class Annealing {
 
   private Found anneal(int run, long steps) {
     SplittableRandom random = new SplittableRandom(seed * 1_000_003 + run);
-    Trial trial = new Trial(puzzle, shuffled(random));
-    double hot = typicalChange(trial, random);
+    boolean neighbours = run % 2 == 1;
+    Trial trial = new Trial(puzzle, neighbours ? start.neighbours(random) : start.any(random));
+    double hot = typicalChange(trial, random) * (neighbours ? COOLER : 1);
     double factor = Math.pow(1e-4, (double) BETWEEN_QUESTIONS / Math.max(BETWEEN_QUESTIONS, steps));
     double temperature = hot;
     Found kept = new Found(trial);
@@ -130,19 +137,6 @@ final class Annealing {
         }
       }
     }
-  }
-
-  private int[] shuffled(SplittableRandom random) {
-    int[] order = puzzle.asTheyCome();
-    for (int[] pool : puzzle.pools) {
-      for (int i = pool.length - 1; i > 0; i--) {
-        int j = random.nextInt(i + 1);
-        int piece = order[pool[i]];
-        order[pool[i]] = order[pool[j]];
-        order[pool[j]] = piece;
-      }
-    }
-    return order;
   }
 
   private void tell(double cost) {

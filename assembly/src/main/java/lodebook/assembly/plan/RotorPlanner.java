@@ -16,6 +16,13 @@ import org.jspecify.annotations.Nullable;
 /// Plans one rotor: facings by the rule, pieces so that the unwanted harmonics are least while the
 /// working amplitude stays within the layout's tolerance.
 public final class RotorPlanner {
+  /// Up to so many empty slots the best plan is proven unless time runs out, up to the second
+  /// number where it comes easily.
+  private static final int ALWAYS_PROVEN = 8;
+
+  private static final int MOST_PROVEN = 16;
+  private static final long NODES_TO_PROVE = 20_000_000;
+
   private final RotorTask task;
   private final HarmonicForm form;
   private final HarmonicForm ideal;
@@ -63,21 +70,44 @@ public final class RotorPlanner {
     }
     Stocked stocked = chosen(choice.sets(), seed, effort);
     Puzzle puzzle = stocked.puzzle();
-    int[] best = new Annealing(puzzle, seed, effort).search();
+    HarmlessClasses classes = classes(puzzle);
+    int[] found = new Annealing(puzzle, classes, seed, effort).search();
+    int[] proven = proven(puzzle, found, effort);
+    int[] best = proven != null ? proven : found;
     List<Placement> placements = stocked.placements(best);
     double amplitude = form.workingAmplitude(puzzle.inSlots(best));
     double target = 2 * puzzle.target;
+    boolean withinTolerance =
+        Math.abs(amplitude / target - 1) <= task.layout().workingAmplitudeTolerance() + 1e-12;
+    Double bound =
+        proven != null && withinTolerance
+            ? Double.valueOf(puzzle.unwanted(best))
+            : LowerBound.of(puzzle, classes);
     return new RotorPlan(
         placements,
         seed,
         puzzle.unwanted(best),
-        null,
+        bound,
         puzzle.unwanted(puzzle.asTheyCome()),
         amplitude,
         target,
-        Math.abs(amplitude / target - 1) <= task.layout().workingAmplitudeTolerance() + 1e-12,
+        withinTolerance,
         Stocked.lotsOf(placements),
         freelyMixed(placements, seed, effort));
+  }
+
+  /// The best order there is where the puzzle is small enough to prove it, else null.
+  private static int @Nullable [] proven(Puzzle puzzle, int[] found, Effort effort) {
+    int slots = puzzle.movable.length;
+    if (!puzzle.certain() || slots > MOST_PROVEN) {
+      return null;
+    }
+    long nodes = slots <= ALWAYS_PROVEN ? NODES_TO_PROVE : effort.steps() / 2;
+    return new ExactSearch(puzzle, found, nodes, effort.keepGoing()).search();
+  }
+
+  private HarmlessClasses classes(Puzzle puzzle) {
+    return new HarmlessClasses(puzzle, task.layout().segmentsPerPolePair());
   }
 
   private Stocked chosen(List<Set<String>> sets, long seed, Effort effort) {
@@ -89,7 +119,8 @@ public final class RotorPlanner {
     double[] costs =
         each.stream()
             .map(Stocked::puzzle)
-            .mapToDouble(puzzle -> puzzle.cost(new Annealing(puzzle, seed, quick).search()))
+            .mapToDouble(
+                puzzle -> puzzle.cost(new Annealing(puzzle, classes(puzzle), seed, quick).search()))
             .toArray();
     return each.get(
         IntStream.range(0, costs.length)
@@ -111,7 +142,7 @@ public final class RotorPlanner {
     Set<String> all = new LotChoice(task.withMix(MixPolicy.FREE)).sets().getFirst();
     Puzzle free = stocked(all).puzzle();
     Effort quick = new Effort(effort.steps() / 4 + 1, effort.keepGoing(), ratio -> {});
-    return free.unwanted(new Annealing(free, seed, quick).search());
+    return free.unwanted(new Annealing(free, classes(free), seed, quick).search());
   }
 
   private Stocked stocked(Set<String> lots) {
