@@ -10,7 +10,8 @@ package lodebook.assembly.survey;
 /// @param strong per placed magnet, that it has over a tenth more than recorded
 /// @param wildReading per reading, that it belongs to nothing (a typing error)
 /// @param signInverted per survey, that all signs are inverted
-/// @param otherStart per survey, that the person began at another slot
+/// @param otherStart per survey, that the person began at another slot; the probability falls with
+///   the square of the distance
 /// @param opposite per survey, that the person went the other way round
 /// @param unitSlip per survey, that one unit was written for another
 /// @param wholeRing per survey, that all readings are off together by more than the meter's
@@ -31,5 +32,5 @@ public record Priors(
   /// What holds where a shop states nothing else (this project's choice, see
   /// docs/decisions/survey-model.md).
   public static final Priors DEFAULT =
-      new Priors(0.02, 0.004, 0.004, 0.004, 0.004, 0.001, 0.002, 0.02, 0.02, 0.02, 0.02, 0.005);
+      new Priors(0.02, 0.002, 0.002, 0.001, 0.004, 0.0001, 0.0003, 0.02, 0.02, 0.02, 0.02, 0.005);
 }

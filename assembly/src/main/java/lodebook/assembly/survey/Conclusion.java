@@ -1,0 +1,274 @@
+package lodebook.assembly.survey;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeSet;
+import lodebook.assembly.layout.Facing;
+import lodebook.assembly.layout.ProbePoint;
+import org.jspecify.annotations.Nullable;
+
+/// Turns an account of a survey into a verdict.
+final class Conclusion {
+  private static final double LEAST_ODDS = 20;
+  private static final double SHOWN_SEPARATION = 2 * Math.log(LEAST_ODDS);
+
+  private final RingModel ring;
+  private final List<Reading> readings;
+  private final Account account;
+  private final Priors priors;
+  private final ReadingFinder finder;
+
+  Conclusion(RingModel ring, List<Reading> readings, Account account, Priors priors) {
+    this.ring = ring;
+    this.readings = readings;
+    this.account = account;
+    this.priors = priors;
+    this.finder = new ReadingFinder(ring);
+  }
+
+  Diagnosis diagnosis() {
+    Judged best = account.best();
+    Judged second = runnerUp();
+    double odds =
+        second == null ? Double.POSITIVE_INFINITY : Math.exp(best.logWeight() - second.logWeight());
+    WholeRingFit whole = new WholeRingFit(account, priors);
+    if (whole.likelierThan(best) || !account.fits()) {
+      @Nullable WholeRing off = whole.estimate();
+      return new Diagnosis(
+          Verdict.CANNOT_TELL,
+          List.of(),
+          account.slip().measuring(),
+          measuringAlternatives(),
+          named(second, odds),
+          off == null ? partingReadings(best, second) : List.of(),
+          off,
+          best.fitProbability(),
+          off == null ? Diagnosis.Reason.NOTHING_FITS : Diagnosis.Reason.WHOLE_RING_OFF);
+    }
+    List<Finding> findings = findings(best.explanation());
+    List<MeasureNext> next = new ArrayList<>();
+    Verdict verdict;
+    Diagnosis.Reason reason;
+    if (odds < LEAST_ODDS) {
+      verdict = Verdict.CANNOT_TELL;
+      reason = Diagnosis.Reason.TOO_CLOSE;
+      next.addAll(partingReadings(best, second));
+    } else if (!best.explanation().namesNoMagnet()) {
+      verdict = Verdict.FAULT;
+      reason = Diagnosis.Reason.FAULT_SHOWN;
+    } else if (!best.explanation().faults().isEmpty()) {
+      verdict = Verdict.CANNOT_TELL;
+      reason = Diagnosis.Reason.SUSPECT_READING;
+    } else if (notShown().isEmpty()) {
+      verdict = Verdict.PASS;
+      reason = Diagnosis.Reason.SHOWN_RIGHT;
+    } else {
+      verdict = Verdict.CANNOT_TELL;
+      reason = Diagnosis.Reason.NOT_ALL_SHOWN;
+    }
+    next.addAll(againReadings(best.explanation()));
+    if (verdict != Verdict.PASS) {
+      next.addAll(indexReadings(findings));
+      for (int slot : notShown()) {
+        next.add(new MeasureNext(finder.showing(slot), MeasureNext.Why.NOT_YET_SHOWN, List.of()));
+      }
+    }
+    return new Diagnosis(
+        verdict,
+        findings,
+        account.slip().measuring(),
+        measuringAlternatives(),
+        named(second, odds),
+        next.stream().distinct().toList(),
+        null,
+        best.fitProbability(),
+        reason);
+  }
+
+  private @Nullable Judged runnerUp() {
+    Judged best = account.best();
+    return account.weighed().stream()
+        .filter(j -> saysOther(j.explanation(), best.explanation()))
+        .findFirst()
+        .orElse(null);
+  }
+
+  /// Whether two explanations name other magnets, or say of the same magnets what cannot be a
+  /// matter of degree: weak shades into missing, reversed does not.
+  private static boolean saysOther(Explanation one, Explanation other) {
+    return !family(one).equals(family(other));
+  }
+
+  private static Map<Integer, FaultKind> family(Explanation explanation) {
+    Map<Integer, FaultKind> family = new HashMap<>();
+    for (Fault fault : explanation.faults()) {
+      if (fault.ofMagnet()) {
+        family.put(
+            fault.place(), fault.kind() == FaultKind.WEAK ? FaultKind.MISSING : fault.kind());
+      }
+    }
+    return family;
+  }
+
+  private static @Nullable RunnerUp named(@Nullable Judged judged, double odds) {
+    if (judged == null) {
+      return null;
+    }
+    return new RunnerUp(names(judged.explanation()), odds);
+  }
+
+  private static List<NamedFault> names(Explanation explanation) {
+    return explanation.faults().stream()
+        .filter(Fault::ofMagnet)
+        .map(f -> new NamedFault(f.place() + 1, nameOf(f)))
+        .toList();
+  }
+
+  private static FaultKind nameOf(Fault fault) {
+    return fault.kind() == FaultKind.WEAK && fault.amount() < Fault.MISSING_BELOW
+        ? FaultKind.MISSING
+        : fault.kind();
+  }
+
+  private List<Measuring> measuringAlternatives() {
+    return account.alternatives().stream()
+        .map(Slip::measuring)
+        .distinct()
+        .filter(m -> !m.equals(account.slip().measuring()))
+        .toList();
+  }
+
+  private List<Finding> findings(Explanation explanation) {
+    double[] right = account.rows().mean(ring.rightPolarisation());
+    double[][] covariance = account.rows().covariance(Explanation.NONE);
+    List<Finding> findings = new ArrayList<>();
+    for (Fault fault : explanation.faults()) {
+      List<Evidence> evidence = new ArrayList<>();
+      int slot =
+          fault.ofMagnet()
+              ? fault.place() + 1
+              : account.rows().rows().get(fault.place()).point().slot();
+      for (int i = 0; i < right.length; i++) {
+        ProbePoint point = account.rows().rows().get(i).point();
+        if (fault.ofMagnet() ? point.slot() == slot : i == fault.place()) {
+          evidence.add(
+              new Evidence(
+                  point,
+                  right[i],
+                  2 * Math.sqrt(covariance[i][i]),
+                  account.rows().rows().get(i).fluxTesla()));
+        }
+      }
+      findings.add(finding(fault, slot, evidence));
+    }
+    return findings;
+  }
+
+  private Finding finding(Fault fault, int slot, List<Evidence> evidence) {
+    Facing should = ring.layout().ruleFacing(slot);
+    FaultKind kind = nameOf(fault);
+    @Nullable Facing faces =
+        switch (kind) {
+          case REVERSED -> should.reversed();
+          case QUARTER_TURN_FORWARD -> should.turned(90);
+          case QUARTER_TURN_BACK -> should.turned(-90);
+          case TURNED -> should.turned(Math.toDegrees(fault.amount()));
+          case WEAK, STRONG -> should;
+          case MISSING, SUSPECT_READING -> null;
+        };
+    return new Finding(
+        fault.ofMagnet() ? slot : readings.get(fault.place()).slot(),
+        kind,
+        should,
+        faces,
+        kind == FaultKind.TURNED ? Double.valueOf(Math.toDegrees(fault.amount())) : null,
+        fault.kind() == FaultKind.WEAK || fault.kind() == FaultKind.STRONG
+            ? Double.valueOf(fault.amount())
+            : null,
+        probability(fault),
+        evidence,
+        fault.ofMagnet() ? alsoPossible(slot) : List.of());
+  }
+
+  private double probability(Fault fault) {
+    double top = account.best().logWeight();
+    double with = 0;
+    double all = 0;
+    for (Judged judged : account.weighed()) {
+      double weight = Math.exp(judged.logWeight() - top);
+      all += weight;
+      boolean names =
+          judged.explanation().faults().stream()
+              .anyMatch(f -> f.place() == fault.place() && nameOf(f) == nameOf(fault));
+      if (names) {
+        with += weight;
+      }
+    }
+    return with / all;
+  }
+
+  private List<Integer> alsoPossible(int slot) {
+    TreeSet<Integer> slots = new TreeSet<>();
+    int written = account.slip().writtenSlot(slot, ring.slots());
+    for (Slip slip : account.alternatives()) {
+      slots.add(slip.realSlot(written, ring.slots()));
+    }
+    slots.remove(slot);
+    return List.copyOf(slots);
+  }
+
+  private List<MeasureNext> partingReadings(Judged best, @Nullable Judged second) {
+    if (second == null) {
+      return List.of();
+    }
+    List<NamedFault> named = new ArrayList<>(names(best.explanation()));
+    named.addAll(names(second.explanation()));
+    return finder.parting(best.explanation(), second.explanation(), 2).stream()
+        .map(point -> new MeasureNext(point, MeasureNext.Why.PARTS_EXPLANATIONS, named))
+        .toList();
+  }
+
+  private List<MeasureNext> againReadings(Explanation explanation) {
+    return explanation.faults().stream()
+        .filter(f -> !f.ofMagnet())
+        .map(
+            f ->
+                new MeasureNext(
+                    account.rows().rows().get(f.place()).point(),
+                    MeasureNext.Why.READ_AGAIN,
+                    List.of()))
+        .toList();
+  }
+
+  private List<MeasureNext> indexReadings(List<Finding> findings) {
+    return findings.stream()
+        .filter(f -> !f.alsoPossibleSlots().isEmpty())
+        .map(
+            f ->
+                new MeasureNext(
+                    finder.showing(f.slot()),
+                    MeasureNext.Why.AGAINST_INDEX_MARK,
+                    List.of(new NamedFault(f.slot(), f.kind()))))
+        .toList();
+  }
+
+  /// Slots, from 1, whose magnet could be reversed without these readings telling at 20 to 1.
+  private List<Integer> notShown() {
+    Cholesky factor = new Cholesky(account.rows().covariance(Explanation.NONE));
+    double[] right = ring.rightPolarisation();
+    List<Integer> slots = new ArrayList<>();
+    for (int slot = 0; slot < ring.slots(); slot++) {
+      if (ring.filled(slot)) {
+        double[] change =
+            factor.whiten(
+                account.rows().answer(slot, -2 * right[2 * slot], -2 * right[2 * slot + 1]));
+        if (Judge.dot(change, change) < SHOWN_SEPARATION) {
+          slots.add(slot + 1);
+        }
+      }
+    }
+    return slots;
+  }
+}

@@ -1,0 +1,230 @@
+package lodebook.assembly.survey;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.BitSet;
+import java.util.Comparator;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+
+/// Ranks explanations with one common covariance.
+///
+/// In whitened space a fault shifts the readings by a fixed vector, so the score of a set of faults
+/// needs only the inner products of those vectors. None, every single fault and every pair are
+/// scored; triples and quadruples grow from the best pairs and triples. Scores are logarithms of
+/// prior times likelihood up to a constant.
+final class Screen {
+  private static final int GROWN_FROM = 200;
+  private static final int MOST_FAULTS = 4;
+  private static final double SHARE_STRETCH = 0.15;
+  private static final double TURN_STRETCH = 0.05;
+  private static final int SUSPECTS_FROM = 12;
+
+  private final RowModel rows;
+  private final Cholesky factor;
+  private final Priors priors;
+  private final List<Fault> faults = new ArrayList<>();
+  private final double[] alone;
+  private final double[][] overlap;
+  private final double[] residual;
+  private final double[] inverseDiagonal;
+
+  Screen(RowModel rows, Cholesky factor, Priors priors) {
+    this.rows = rows;
+    this.factor = factor;
+    this.priors = priors;
+    RingModel ring = rows.ring();
+    for (int slot = 0; slot < ring.slots(); slot++) {
+      faults.addAll(Possible.of(ring, slot));
+    }
+    double[] right = ring.rightPolarisation();
+    double[] mean = rows.mean(right);
+    residual = rows.read();
+    for (int i = 0; i < residual.length; i++) {
+      residual[i] -= mean[i];
+    }
+    inverseDiagonal = factor.inverseDiagonal();
+    int width = 2 * ring.slots();
+    double[][] white = new double[rows.count()][width];
+    for (int i = 0; i < white.length; i++) {
+      for (int c = 0; c < width; c++) {
+        white[i][c] = rows.answer(i, c);
+      }
+    }
+    factor.whitenAll(white);
+    double[][] product = new double[width][width];
+    double[] against = new double[width];
+    double[] whiteResidual = factor.whiten(residual);
+    for (int i = 0; i < white.length; i++) {
+      double[] line = white[i];
+      for (int c = 0; c < width; c++) {
+        double value = line[c];
+        against[c] += value * whiteResidual[i];
+        double[] target = product[c];
+        for (int d = 0; d < width; d++) {
+          target[d] += value * line[d];
+        }
+      }
+    }
+    double[][] change = new double[faults.size()][];
+    for (int e = 0; e < change.length; e++) {
+      change[e] = change(faults.get(e), right);
+    }
+    alone = new double[change.length];
+    overlap = new double[change.length][change.length];
+    for (int e = 0; e < change.length; e++) {
+      int at = 2 * faults.get(e).place();
+      for (int f = 0; f < change.length; f++) {
+        int to = 2 * faults.get(f).place();
+        overlap[e][f] =
+            change[e][0] * (product[at][to] * change[f][0] + product[at][to + 1] * change[f][1])
+                + change[e][1]
+                    * (product[at + 1][to] * change[f][0] + product[at + 1][to + 1] * change[f][1]);
+      }
+      alone[e] =
+          logPrior(faults.get(e))
+              + change[e][0] * against[at]
+              + change[e][1] * against[at + 1]
+              - 0.5 * overlap[e][e];
+    }
+  }
+
+  /// Prior of a fault; for a step of an amount, of roughly the stretch that its readings could
+  /// mean.
+  private double logPrior(Fault fault) {
+    double prior = fault.prior(priors);
+    return switch (fault.kind()) {
+      case WEAK, STRONG -> Math.log(prior * SHARE_STRETCH * fault.shareDensity(fault.amount()));
+      case TURNED -> Math.log(prior * TURN_STRETCH);
+      default -> Math.log(prior);
+    };
+  }
+
+  private static double[] change(Fault fault, double[] right) {
+    int at = 2 * fault.place();
+    double[] into = new double[2];
+    fault.polarise(right[at], right[at + 1], into, 0);
+    into[0] -= right[at];
+    into[1] -= right[at + 1];
+    return into;
+  }
+
+  /// The likeliest explanations, likeliest first; the ring being right is always among them.
+  List<Explanation> likeliest(int count) {
+    List<Best.Scored<int[]>> ranked = new ArrayList<>();
+    ranked.add(new Best.Scored<>(0, new int[0]));
+    List<Best.Scored<int[]>> level = ranked;
+    for (int size = 1; size <= MOST_FAULTS; size++) {
+      level = size == 2 ? pairs() : grown(level);
+      ranked.addAll(level);
+    }
+    ranked.sort(Comparator.comparingDouble((Best.Scored<int[]> s) -> -s.score()));
+    List<Best.Scored<Explanation>> found = new ArrayList<>();
+    for (Best.Scored<int[]> scored : ranked) {
+      Explanation explanation =
+          new Explanation(Arrays.stream(scored.what()).mapToObj(faults::get).toList());
+      found.add(new Best.Scored<>(scored.score(), explanation));
+      if (found.size() <= SUSPECTS_FROM) {
+        withSuspects(scored, explanation).forEach(found::add);
+      }
+      if (found.size() > 4 * count) {
+        break;
+      }
+    }
+    found.sort(Comparator.comparingDouble((Best.Scored<Explanation> s) -> -s.score()));
+    return different(found, count);
+  }
+
+  private static List<Explanation> different(List<Best.Scored<Explanation>> found, int count) {
+    List<Explanation> list = new ArrayList<>();
+    Set<List<NamedFault>> seen = new HashSet<>();
+    for (Best.Scored<Explanation> scored : found) {
+      if (list.size() < count && seen.add(scored.what().key())) {
+        list.add(scored.what());
+      }
+    }
+    if (seen.add(List.of())) {
+      list.add(Explanation.NONE);
+    }
+    return list;
+  }
+
+  private List<Best.Scored<int[]>> pairs() {
+    Best<int[]> best = new Best<>(GROWN_FROM);
+    for (int e = 0; e < alone.length; e++) {
+      double[] line = overlap[e];
+      int place = faults.get(e).place();
+      for (int f = e + 1; f < alone.length; f++) {
+        double score = alone[e] + alone[f] - line[f];
+        if (score > best.bar() && faults.get(f).place() != place) {
+          best.offer(score, new int[] {e, f});
+        }
+      }
+    }
+    return best.sorted();
+  }
+
+  private List<Best.Scored<int[]>> grown(List<Best.Scored<int[]>> from) {
+    Best<int[]> best = new Best<>(GROWN_FROM);
+    Set<BitSet> seen = new HashSet<>();
+    for (Best.Scored<int[]> scored : from) {
+      int[] members = scored.what();
+      for (int e = 0; e < alone.length; e++) {
+        double score = scored.score() + alone[e];
+        for (int member : members) {
+          score -= overlap[member][e];
+        }
+        if (score > best.bar() && free(members, e)) {
+          int[] more = Arrays.copyOf(members, members.length + 1);
+          more[members.length] = e;
+          BitSet key = new BitSet();
+          for (int member : more) {
+            key.set(member);
+          }
+          if (seen.add(key)) {
+            best.offer(score, more);
+          }
+        }
+      }
+    }
+    return best.sorted();
+  }
+
+  private boolean free(int[] members, int candidate) {
+    for (int member : members) {
+      if (faults.get(member).place() == faults.get(candidate).place()) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /// The explanation with each row in turn taken as belonging to nothing, where that helps.
+  private List<Best.Scored<Explanation>> withSuspects(
+      Best.Scored<int[]> scored, Explanation explanation) {
+    double[] rest = residual.clone();
+    double[] right = rows.ring().rightPolarisation();
+    for (int e : scored.what()) {
+      double[] change = change(faults.get(e), right);
+      double[] shift = rows.answer(faults.get(e).place(), change[0], change[1]);
+      for (int i = 0; i < rest.length; i++) {
+        rest[i] -= shift[i];
+      }
+    }
+    double[] solved = factor.solve(rest);
+    double wild = rows.wildVariance();
+    List<Best.Scored<Explanation>> found = new ArrayList<>();
+    for (int i = 0; i < rest.length; i++) {
+      double gain =
+          0.5
+              * (solved[i] * solved[i] / (inverseDiagonal[i] + 1 / wild)
+                  - Math.log1p(wild * inverseDiagonal[i]));
+      double change = gain + Math.log(priors.wildReading());
+      if (change > -6) {
+        found.add(new Best.Scored<>(scored.score() + change, explanation.with(Fault.suspect(i))));
+      }
+    }
+    return found;
+  }
+}

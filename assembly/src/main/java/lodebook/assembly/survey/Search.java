@@ -1,0 +1,89 @@
+package lodebook.assembly.survey;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+/// Finds the likeliest explanations of a set of rows.
+///
+/// The first screening uses the plan's covariance, widened where a reversed magnet would widen it;
+/// each later one that of the likeliest explanation found so far, until that no longer changes.
+final class Search {
+  private static final int FIRST = 30;
+  private static final int LATER = 20;
+  private static final int ROUNDS = 5;
+  private static final double NAMED_FROM = Math.log(20);
+
+  private Search() {}
+
+  /// All explanations that were weighed, likeliest first.
+  static List<Judged> explain(RowModel rows, Priors priors) {
+    Judge judge = new Judge(rows, priors);
+    Map<List<NamedFault>, Judged> weighed = new HashMap<>();
+    Judged best = weigh(judge, screening(rows), rows, priors, FIRST, weighed);
+    for (int round = 1; round < ROUNDS; round++) {
+      Cholesky own = new Cholesky(rows.covariance(best.explanation().ofMagnets()));
+      Judged next = weigh(judge, own, rows, priors, LATER, weighed);
+      if (next.explanation().key().equals(best.explanation().key())) {
+        break;
+      }
+      best = next;
+    }
+    return sorted(withoutIdleSuspects(judge, weighed));
+  }
+
+  /// Drops explanations that call a reading suspect without being 20 times as likely as the same
+  /// without that.
+  private static Map<List<NamedFault>, Judged> withoutIdleSuspects(
+      Judge judge, Map<List<NamedFault>, Judged> weighed) {
+    Map<List<NamedFault>, Judged> kept = new HashMap<>();
+    for (Judged judged : weighed.values()) {
+      Explanation plain = judged.explanation().ofMagnets();
+      if (plain.faults().size() < judged.explanation().faults().size()) {
+        Judged without = weighed.get(plain.key());
+        if (without == null) {
+          without = judge.judge(plain);
+        }
+        kept.put(plain.key(), without);
+        if (judged.logWeight() < without.logWeight() + NAMED_FROM) {
+          continue;
+        }
+      }
+      kept.put(judged.explanation().key(), judged);
+    }
+    return kept;
+  }
+
+  private static Judged weigh(
+      Judge judge,
+      Cholesky factor,
+      RowModel rows,
+      Priors priors,
+      int count,
+      Map<List<NamedFault>, Judged> weighed) {
+    for (Explanation explanation : new Screen(rows, factor, priors).likeliest(count)) {
+      weighed.computeIfAbsent(explanation.key(), key -> judge.judge(explanation));
+    }
+    return sorted(weighed).getFirst();
+  }
+
+  private static List<Judged> sorted(Map<List<NamedFault>, Judged> weighed) {
+    List<Judged> list = new ArrayList<>(weighed.values());
+    list.sort(Comparator.comparingDouble((Judged j) -> -j.logWeight()));
+    return list;
+  }
+
+  /// Covariance for the first screening.
+  static Cholesky screening(RowModel rows) {
+    double[] right = rows.ring().rightPolarisation();
+    double[][] matrix = rows.covariance(Explanation.NONE);
+    double[] plan = rows.singleVariances(right);
+    double[] wide = rows.largestSingleVariances(right);
+    for (int i = 0; i < matrix.length; i++) {
+      matrix[i][i] += 0.5 * (wide[i] - plan[i]);
+    }
+    return new Cholesky(matrix);
+  }
+}

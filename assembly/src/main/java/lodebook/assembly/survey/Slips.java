@@ -1,0 +1,140 @@
+package lodebook.assembly.survey;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+
+/// Decides what the person measuring did.
+///
+/// Everything as set wins where it explains the readings, unless a slip is a thousand times as
+/// probable. Look-alikes are not listed anywhere: every slip is tried on the ring's own expected
+/// readings.
+final class Slips {
+  private static final double EQUAL = Math.log(20);
+  private static final double AS_SET_WINS_BY = Math.log(1000);
+  private static final double ROUGHLY_LIKE = 0.1;
+  private static final double WITH_A_FAULT = 0.8;
+  private static final int SEARCHED = 6;
+
+  private final RingModel ring;
+  private final List<Reading> readings;
+  private final Priors priors;
+
+  Slips(RingModel ring, List<Reading> readings, Priors priors) {
+    this.ring = ring;
+    this.readings = readings;
+    this.priors = priors;
+  }
+
+  private record Tried(Slip slip, RowModel rows, Judged judged) {
+    double logWeight(Priors priors) {
+      return judged.logWeight() + slip.logPrior(priors, rows.ring().slots());
+    }
+  }
+
+  Account account() {
+    RowModel asSet = rows(Slip.NONE);
+    Account plain = new Account(Slip.NONE, asSet, Search.explain(asSet, priors), List.of());
+    List<Tried> right = tried(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE);
+    Account chosen = plain;
+    Tried slipped = likeliest(right);
+    if (slipped != null
+        && (!plain.fits()
+            || slipped.logWeight(priors) > plain.best().logWeight() + AS_SET_WINS_BY)) {
+      chosen = searched(slipped.slip());
+    } else if (!plain.fits()) {
+      chosen = slippedWithFaults(plain);
+    }
+    return withAlternatives(chosen);
+  }
+
+  private @Nullable Tried likeliest(List<Tried> tried) {
+    return tried.stream()
+        .filter(t -> t.judged().fitProbability() >= Account.LEAST_FIT)
+        .max(Comparator.comparingDouble(t -> t.logWeight(priors)))
+        .orElse(null);
+  }
+
+  private Account searched(Slip slip) {
+    RowModel rows = rows(slip);
+    return new Account(slip, rows, Search.explain(rows, priors), List.of());
+  }
+
+  private Account slippedWithFaults(Account plain) {
+    Account best = plain;
+    double bestWeight = Double.NEGATIVE_INFINITY;
+    List<Tried> tried = new ArrayList<>(tried(Slip.NONE, Explanation.NONE, WITH_A_FAULT));
+    tried.sort(Comparator.comparingDouble(t -> -t.logWeight(priors)));
+    for (Tried one : tried.subList(0, Math.min(SEARCHED, tried.size()))) {
+      Account account = searched(one.slip());
+      double weight = account.best().logWeight() + one.slip().logPrior(priors, ring.slots());
+      if (account.fits() && weight > bestWeight) {
+        best = account;
+        bestWeight = weight;
+      }
+    }
+    return best;
+  }
+
+  private Account withAlternatives(Account chosen) {
+    Explanation explanation = chosen.best().explanation();
+    List<Tried> equal = new ArrayList<>(tried(chosen.slip(), explanation, ROUGHLY_LIKE));
+    if (!explanation.faults().isEmpty()) {
+      equal.addAll(tried(chosen.slip(), Explanation.NONE, ROUGHLY_LIKE));
+    }
+    double bar = chosen.best().logWeight() - EQUAL;
+    List<Slip> alternatives =
+        equal.stream()
+            .filter(t -> t.judged().fitProbability() >= Account.LEAST_FIT)
+            .filter(t -> t.judged().logWeight() >= bar)
+            .filter(t -> !t.slip().equals(chosen.slip()))
+            .sorted(Comparator.comparingDouble(t -> -t.logWeight(priors)))
+            .map(Tried::slip)
+            .distinct()
+            .toList();
+    return new Account(chosen.slip(), chosen.rows(), chosen.weighed(), alternatives);
+  }
+
+  /// Weighs the image of an explanation under every slip that leaves less than a share of the
+  /// readings' energy unexplained.
+  private List<Tried> tried(Slip from, Explanation explanation, double share) {
+    List<Tried> tried = new ArrayList<>();
+    double[] polarisation = new double[0];
+    for (Slip slip : Slip.all(ring.slots())) {
+      if (slip.equals(Slip.NONE) && from.equals(Slip.NONE)) {
+        continue;
+      }
+      Explanation image = from.image(explanation, slip, ring.slots());
+      if (!standsOnMagnets(image)) {
+        continue;
+      }
+      polarisation = ring.polarisation(image);
+      if (leftOver(slip, polarisation) < share) {
+        RowModel rows = rows(slip);
+        tried.add(new Tried(slip, rows, new Judge(rows, priors).judge(image)));
+      }
+    }
+    return tried;
+  }
+
+  private boolean standsOnMagnets(Explanation explanation) {
+    return explanation.faults().stream().allMatch(f -> !f.ofMagnet() || ring.filled(f.place()));
+  }
+
+  private double leftOver(Slip slip, double[] polarisation) {
+    double energy = 0;
+    double left = 0;
+    for (Reading reading : readings) {
+      Row row = slip.row(reading, ring.layout());
+      double expected = ring.expected(row, polarisation);
+      energy += Math.max(expected * expected, 0);
+      left += (row.fluxTesla() - expected) * (row.fluxTesla() - expected);
+    }
+    return energy > 0 ? left / energy : Double.POSITIVE_INFINITY;
+  }
+
+  private RowModel rows(Slip slip) {
+    return new RowModel(ring, slip.rows(readings, ring.layout()));
+  }
+}

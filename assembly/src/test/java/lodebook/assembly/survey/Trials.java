@@ -1,0 +1,152 @@
+package lodebook.assembly.survey;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.SplittableRandom;
+import java.util.TreeSet;
+import java.util.function.BiFunction;
+import java.util.stream.Collectors;
+import lodebook.assembly.layout.RingDesign;
+
+/// Counts how often surveys with a known truth are explained rightly.
+final class Trials {
+  static final Meter METER = new Meter("trial", 0.01, 0.2e-3);
+
+  /// @param right the truth was said
+  /// @param cannotTell nothing was claimed
+  /// @param wrongOnes where something else was claimed
+  /// @param unsureOnes where nothing was claimed
+  record Count(int right, int cannotTell, List<String> wrongOnes, List<String> unsureOnes) {
+    @Override
+    public String toString() {
+      return "right " + right + ", cannot tell " + cannotTell + ", wrong " + wrongOnes.size();
+    }
+  }
+
+  /// One survey and what would be right to say of it.
+  record Trial(
+      SurveyedRing ring,
+      List<Reading> readings,
+      List<Fault> faults,
+      Set<String> truth,
+      Measuring measuring) {}
+
+  private Trials() {}
+
+  static Count run(int count, long seed, BiFunction<SplittableRandom, Integer, Trial> make) {
+    int right = 0;
+    int unsure = 0;
+    List<String> wrong = new ArrayList<>();
+    List<String> unsureOnes = new ArrayList<>();
+    Map<RingDesign, ProbeResponses> shared = new HashMap<>();
+    for (int i = 0; i < count; i++) {
+      Trial trial = make.apply(new SplittableRandom(seed + i), i);
+      Diagnosis said =
+          new SurveyExplainer(
+                  trial.ring(),
+                  Priors.DEFAULT,
+                  shared.computeIfAbsent(trial.ring().design(), ProbeResponses::new))
+              .explain(trial.readings());
+      if (isRight(trial, said)) {
+        right++;
+      } else if (said.verdict() == Verdict.CANNOT_TELL) {
+        unsure++;
+        unsureOnes.add(
+            "seed "
+                + (seed + i)
+                + ": "
+                + trial.truth()
+                + " but "
+                + brief(said)
+                + " truth "
+                + weight(trial));
+      } else {
+        wrong.add(
+            "seed "
+                + (seed + i)
+                + ": "
+                + trial.truth()
+                + " but "
+                + brief(said)
+                + " truth "
+                + weight(trial));
+      }
+    }
+    return new Count(right, unsure, wrong, unsureOnes);
+  }
+
+  /// Weight and fit of the true explanation.
+  private static Judged weight(Trial trial) {
+    RingModel ring = new RingModel(trial.ring(), new ProbeResponses(trial.ring().design()));
+    RowModel rows = new RowModel(ring, Slip.NONE.rows(trial.readings(), trial.ring().layout()));
+    System.out.print("best " + Search.explain(rows, Priors.DEFAULT).getFirst() + " ");
+    return new Judge(rows, Priors.DEFAULT).judge(new Explanation(trial.faults()));
+  }
+
+  static String brief(Diagnosis said) {
+    return said.verdict().word()
+        + " "
+        + said.findings().stream()
+            .map(f -> f.slot() + " " + f.kind().word() + " " + f.strengthShare())
+            .toList()
+        + " "
+        + said.reason()
+        + " fit "
+        + said.fitProbability()
+        + " next "
+        + said.runnerUp()
+        + " whole "
+        + said.wholeRing()
+        + " "
+        + said.measuring();
+  }
+
+  private static boolean isRight(Trial trial, Diagnosis said) {
+    Set<String> names =
+        said.findings().stream()
+            .map(f -> f.slot() + " " + f.kind().word())
+            .collect(Collectors.toCollection(TreeSet::new));
+    boolean wild = trial.truth().stream().anyMatch(t -> t.endsWith("suspect reading"));
+    Verdict verdict =
+        trial.truth().isEmpty() ? Verdict.PASS : wild ? Verdict.CANNOT_TELL : Verdict.FAULT;
+    boolean measured =
+        said.measuring().equals(trial.measuring())
+            || said.measuringAlternatives().contains(trial.measuring());
+    return said.verdict() == verdict && names.equals(trial.truth()) && measured;
+  }
+
+  static Set<String> words(List<Fault> faults) {
+    return faults.stream()
+        .map(f -> f.place() + 1 + " " + f.kind().word())
+        .collect(Collectors.toCollection(TreeSet::new));
+  }
+
+  /// Surveys of a ring with some faults of given kinds in random slots.
+  static BiFunction<SplittableRandom, Integer, Trial> faults(
+      RingDesign design, int filled, List<Fault> kinds) {
+    return (random, i) -> {
+      List<Integer> slots = new ArrayList<>();
+      while (slots.size() < kinds.size()) {
+        int slot = random.nextInt(filled);
+        if (!slots.contains(slot)) {
+          slots.add(slot);
+        }
+      }
+      List<Fault> faults = new ArrayList<>();
+      for (int k = 0; k < kinds.size(); k++) {
+        faults.add(new Fault(slots.get(k), kinds.get(k).kind(), kinds.get(k).amount()));
+      }
+      RingTruth truth = new RingTruth(design, filled, faults, random);
+      double gain = METER.accuracy() * random.nextGaussian();
+      return new Trial(
+          truth.recorded(),
+          truth.read(filled, METER, gain, 0),
+          faults,
+          words(faults),
+          Measuring.AS_SET);
+    };
+  }
+}
