@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.builds;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.layouts;
+
+import org.jspecify.annotations.NullMarked;
