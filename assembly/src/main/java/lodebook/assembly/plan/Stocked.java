@@ -6,23 +6,12 @@ import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
-import lodebook.assembly.layout.Facing;
-import lodebook.assembly.magnet.Strength;
-import org.jspecify.annotations.Nullable;
 
 /// A rotor's task turned into a puzzle of numbers, and an order turned back into placements.
 final class Stocked {
   private final RotorTask task;
   private final List<Source> sources;
   private final Puzzle puzzle;
-
-  /// A magnet that is or may be used.
-  private record Source(@Nullable String piece, String lot, Strength strength, boolean kept) {
-    double variance() {
-      double sigma = strength.standardUncertaintyTesla();
-      return piece == null ? sigma * sigma : 0;
-    }
-  }
 
   /// @param task what is asked
   /// @param form the ring's harmonics, for the facings of the task
@@ -33,7 +22,7 @@ final class Stocked {
     int slots = task.layout().slots();
     Source[] inSlots = new Source[slots];
     for (Kept kept : task.kept()) {
-      inSlots[kept.slot() - 1] = new Source(kept.piece(), kept.lot(), kept.strength(), true);
+      inSlots[kept.slot() - 1] = Source.of(kept);
     }
     List<Source> spares = new ArrayList<>();
     List<int[]> pools = new ArrayList<>();
@@ -57,7 +46,7 @@ final class Stocked {
     puzzle =
         new Puzzle(
             form,
-            sources.stream().mapToDouble(each -> each.strength().remanenceTesla()).toArray(),
+            sources.stream().mapToDouble(Source::remanence).toArray(),
             sources.stream().mapToDouble(Source::variance).toArray(),
             pools.toArray(int[][]::new),
             target / 2,
@@ -68,14 +57,14 @@ final class Stocked {
     List<Source> usable = new ArrayList<>();
     for (Candidate each : task.candidates()) {
       if (each.type().equals(type) && lots.contains(each.lot())) {
-        usable.add(new Source(each.piece(), each.lot(), each.strength(), false));
+        usable.add(Source.of(each));
       }
     }
     for (LotSupply each : task.unmeasured()) {
       if (each.type().equals(type) && lots.contains(each.lot())) {
         int count = Math.min(each.count(), Math.max(0, needed - usable.size()));
         for (int i = 0; i < count; i++) {
-          usable.add(new Source(null, each.lot(), each.strength(), false));
+          usable.add(Source.of(each));
         }
       }
     }
@@ -89,25 +78,9 @@ final class Stocked {
   List<Placement> placements(int[] order) {
     List<Placement> placements = new ArrayList<>();
     for (int slot = 1; slot <= task.layout().slots(); slot++) {
-      Source source = sources.get(order[slot - 1]);
-      placements.add(
-          new Placement(
-              slot,
-              source.piece(),
-              source.lot(),
-              source.kept() ? keptFacing(slot) : task.layout().ruleFacing(slot),
-              source.strength(),
-              source.kept()));
+      placements.add(sources.get(order[slot - 1]).in(slot, task.layout().ruleFacing(slot)));
     }
     return placements;
-  }
-
-  private Facing keptFacing(int slot) {
-    return task.kept().stream()
-        .filter(kept -> kept.slot() == slot)
-        .map(Kept::facing)
-        .findFirst()
-        .orElseThrow();
   }
 
   static List<String> lotsOf(List<Placement> placements) {

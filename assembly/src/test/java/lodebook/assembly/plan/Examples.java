@@ -10,8 +10,11 @@ import lodebook.assembly.layout.InsertFrom;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.Numbering;
 import lodebook.assembly.layout.Probe;
+import lodebook.assembly.layout.RingDesign;
 import lodebook.assembly.layout.Spot;
 import lodebook.assembly.layout.Spread;
+import lodebook.assembly.magnet.MagnetType;
+import lodebook.assembly.magnet.Shape;
 import lodebook.assembly.magnet.Strength;
 import org.jspecify.annotations.Nullable;
 
@@ -44,6 +47,17 @@ final class Examples {
         false,
         InsertFrom.FACE,
         0.03);
+  }
+
+  /// The layout with its blocks, recoil permeability 1.
+  static RingDesign design(Layout layout) {
+    String side = layout.sideMagnetType();
+    return new RingDesign(layout, block("MAIN"), side == null ? null : block(side));
+  }
+
+  private static MagnetType block(String code) {
+    return new MagnetType(
+        code, Shape.BLOCK, SIZE, SIZE, LENGTH, 0, 0, 0, "N42", 0.05e-3, "nickel", 1, 0);
   }
 
   static DipoleRing ring(Layout layout) {

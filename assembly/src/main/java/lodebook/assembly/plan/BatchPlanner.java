@@ -1,0 +1,152 @@
+package lodebook.assembly.plan;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeMap;
+import lodebook.assembly.layout.Facing;
+import lodebook.assembly.layout.Layout;
+import lodebook.assembly.layout.RingDesign;
+
+/// Plans all rotors of a batch from common stock: rotors of a layout alike in working amplitude,
+/// each low in unwanted harmonics.
+public final class BatchPlanner {
+  /// Tried exchanges for each slot of the batch.
+  private static final long STEPS_A_SLOT = 10_000;
+
+  private final BatchTask task;
+  private final HarmonicForm[] forms;
+  private final Map<String, List<BatchLots.Bucket>> buckets = new LinkedHashMap<>();
+
+  /// @param task what is asked
+  public BatchPlanner(BatchTask task) {
+    this.task = task;
+    forms = forms(task);
+    for (String type : task.types()) {
+      buckets.put(type, new BatchLots(task, type).buckets());
+    }
+  }
+
+  /// What is short before anything can be planned, type by type.
+  public static List<Shortage> shortages(BatchTask task) {
+    return task.types().stream()
+        .map(type -> new BatchLots(task, type).shortage())
+        .filter(each -> each.missing() > 0)
+        .toList();
+  }
+
+  /// The usual effort for a batch, about 10 s of one processor for 50 rotors of 48 slots.
+  public static Effort usualEffort(BatchTask task) {
+    long slots = task.rings().stream().mapToLong(ring -> ring.design().slots()).sum();
+    return new Effort(STEPS_A_SLOT * slots, () -> true, ratio -> {});
+  }
+
+  /// The best plans found.
+  ///
+  /// @param seed the same seed gives the same plans
+  /// @param effort how long to search; it is told the root mean square over the rings of harmonics
+  ///   and weighted deviation of amplitudes
+  /// @throws IllegalArgumentException where pieces are short; see [#shortages(BatchTask)]
+  public BatchPlan plan(long seed, Effort effort) {
+    List<Shortage> shortages = shortages(task);
+    if (!shortages.isEmpty()) {
+      throw new IllegalArgumentException("pieces are short for the batch: " + shortages);
+    }
+    BatchHolders holders = new BatchHolders(task, forms, buckets);
+    BatchPuzzle puzzle = holders.puzzle();
+    int[] order = new BatchAnnealing(puzzle, seed, effort).search(holders.dealt());
+    Map<String, RotorPlan> plans = new LinkedHashMap<>();
+    Map<String, List<Double>> amplitudes = new TreeMap<>();
+    Set<String> used = new HashSet<>();
+    for (int ring = 0; ring < forms.length; ring++) {
+      RotorPlan plan = plan(ring, holders, order, seed);
+      plans.put(task.rings().get(ring).rotor(), plan);
+      amplitudes
+          .computeIfAbsent(layout(ring).name(), name -> new ArrayList<>())
+          .add(plan.workingAmplitudeTesla());
+      for (Placement each : plan.placements()) {
+        used.add(String.valueOf(each.piece()));
+      }
+    }
+    Map<String, Double> spread = new LinkedHashMap<>();
+    amplitudes.forEach((name, values) -> spread.put(name, relativeSpread(values)));
+    return new BatchPlan(
+        plans,
+        spread,
+        task.candidates().stream()
+            .map(Candidate::piece)
+            .filter(piece -> !used.contains(piece))
+            .toList());
+  }
+
+  private RotorPlan plan(int ring, BatchHolders holders, int[] order, long seed) {
+    Layout layout = layout(ring);
+    HarmonicForm form = forms[ring];
+    List<Source> sources = holders.inSlots(ring, order);
+    List<Placement> placements = new ArrayList<>();
+    for (int slot = 1; slot <= layout.slots(); slot++) {
+      placements.add(sources.get(slot - 1).in(slot, layout.ruleFacing(slot)));
+    }
+    double target = 2 * holders.puzzle().target[ring];
+    double amplitude = form.workingAmplitude(strengths(sources));
+    Puzzle own = holders.alone(ring, sources);
+    return new RotorPlan(
+        placements,
+        seed,
+        unwanted(form, sources),
+        LowerBound.of(own, new HarmlessClasses(own, layout.segmentsPerPolePair())),
+        unwanted(form, holders.asTheyCome(ring)),
+        amplitude,
+        target,
+        Math.abs(amplitude / target - 1) <= layout.workingAmplitudeTolerance() + 1e-12,
+        Stocked.lotsOf(placements),
+        null);
+  }
+
+  private Layout layout(int ring) {
+    return task.rings().get(ring).design().layout();
+  }
+
+  private static double unwanted(HarmonicForm form, List<Source> sources) {
+    return form.unwanted(
+        strengths(sources), sources.stream().mapToDouble(Source::variance).toArray());
+  }
+
+  private static double[] strengths(List<Source> sources) {
+    return sources.stream().mapToDouble(Source::remanence).toArray();
+  }
+
+  private static double relativeSpread(List<Double> values) {
+    double mean = values.stream().mapToDouble(each -> each).average().orElse(1);
+    double squares = values.stream().mapToDouble(each -> (each - mean) * (each - mean)).sum();
+    return values.size() < 2 ? 0 : Math.sqrt(squares / (values.size() - 1)) / mean;
+  }
+
+  private static HarmonicForm[] forms(BatchTask task) {
+    Map<RingDesign, RingHarmonics> byRule = new HashMap<>();
+    Map<RingDesign, HarmonicForm> known = new HashMap<>();
+    HarmonicForm[] forms = new HarmonicForm[task.rings().size()];
+    for (int ring = 0; ring < forms.length; ring++) {
+      BatchTask.Ring each = task.rings().get(ring);
+      RingDesign design = each.design();
+      RingHarmonics ideal =
+          byRule.computeIfAbsent(design, d -> RingHarmonics.of(d, d.ruleFacings()));
+      List<String> types = task.types();
+      int[] pool = new int[design.slots()];
+      Arrays.setAll(pool, i -> types.indexOf(design.layout().typeAt(i + 1)));
+      if (each.kept().isEmpty()) {
+        forms[ring] = known.computeIfAbsent(design, d -> HarmonicForm.of(ideal, ideal, pool));
+      } else {
+        List<Facing> facings = new ArrayList<>(design.ruleFacings());
+        each.kept().forEach(kept -> facings.set(kept.slot() - 1, kept.facing()));
+        forms[ring] = HarmonicForm.of(RingHarmonics.of(design, facings), ideal, pool);
+      }
+    }
+    return forms;
+  }
+}
