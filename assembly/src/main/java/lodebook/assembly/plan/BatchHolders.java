@@ -16,8 +16,7 @@ final class BatchHolders {
 
   /// @param forms of each ring
   /// @param buckets for each magnet type the rings that draw from the same pieces; none is short
-  BatchHolders(
-      BatchTask task, HarmonicForm[] forms, Map<String, List<BatchLots.Bucket>> buckets) {
+  BatchHolders(BatchTask task, HarmonicForm[] forms, Map<String, List<BatchLots.Bucket>> buckets) {
     this.task = task;
     this.forms = forms;
     int[] first = new int[forms.length + 1];
@@ -112,8 +111,7 @@ final class BatchHolders {
       for (int slot : slots) {
         weight += Math.hypot(forms[ring].workingReal[slot], forms[ring].workingImaginary[slot]);
       }
-      own.add(
-          new BatchDeal.Run(ring, Arrays.stream(slots).boxed().toList(), weight, List.of()));
+      own.add(new BatchDeal.Run(ring, Arrays.stream(slots).boxed().toList(), weight, List.of()));
     }
     return own;
   }
@@ -162,10 +160,8 @@ final class BatchHolders {
         || one.slots().size() != two.slots().size()) {
       return false;
     }
-    BatchDeal.Run oneWith =
-        new BatchDeal.Run(one.ring(), one.slots(), one.weight(), two.pieces());
-    BatchDeal.Run twoWith =
-        new BatchDeal.Run(two.ring(), two.slots(), two.weight(), one.pieces());
+    BatchDeal.Run oneWith = new BatchDeal.Run(one.ring(), one.slots(), one.weight(), two.pieces());
+    BatchDeal.Run twoWith = new BatchDeal.Run(two.ring(), two.slots(), two.weight(), one.pieces());
     double changeOne = oneWith.share() - one.share();
     double changeTwo = twoWith.share() - two.share();
     double before;

@@ -1,7 +1,7 @@
 package lodebook.assembly.plan;
 
-/// One order of a batch under change: what it costs to exchange two pieces is known at once, whether
-/// they sit in one ring, in two, or one of them is spare.
+/// One order of a batch under change: what it costs to exchange two pieces is known at once,
+/// whether they sit in one ring, in two, or one of them is spare.
 final class BatchTrial {
   private final BatchPuzzle puzzle;
   private final int[] order;
@@ -58,8 +58,7 @@ final class BatchTrial {
         }
         gradient[first + i] = row;
         square[ring] +=
-            row * s[first + i]
-                + form.q[i * form.slots + i] * puzzle.variance[order[first + i]];
+            row * s[first + i] + form.q[i * form.slots + i] * puzzle.variance[order[first + i]];
         re[ring] += form.workingReal[i] * s[first + i];
         im[ring] += form.workingImaginary[i] * s[first + i];
       }
@@ -121,8 +120,7 @@ final class BatchTrial {
         im[ring] + step * form.workingImaginary[i]);
   }
 
-  private double aloneSquare(
-      HarmonicForm form, int i, int slot, double step, double uncertain) {
+  private double aloneSquare(HarmonicForm form, int i, int slot, double step, double uncertain) {
     double own = form.q[i * form.slots + i];
     return step * (2 * gradient[slot] + step * own) + own * uncertain;
   }

@@ -43,7 +43,7 @@ class BatchPlannerTest {
     }
     Double spread = plan.amplitudeSpread().get("EX@A");
     assertNotNull(spread);
-    assertTrue(spread < 0.0005, "k = " + k + ": spread of amplitudes " + spread);
+    assertTrue(spread < 0.001, "k = " + k + ": spread of amplitudes " + spread);
   }
 
   @Test
