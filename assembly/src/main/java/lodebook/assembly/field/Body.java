@@ -10,7 +10,7 @@ package lodebook.assembly.field;
 ///
 /// Own frame: x along the thickness (the radius, where the body stands square in its slot), y
 /// towards the next slot, z along the ring's axis.
-public sealed interface Body permits Block {
+public sealed interface Body permits Block, Cylinder, ArcSegment {
 
   /// The parts of F in the ring's plane.
   ///

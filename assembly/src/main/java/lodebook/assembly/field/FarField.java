@@ -43,4 +43,28 @@ final class FarField {
     into[at + 1] = scale * yy;
     into[at + 2] = scale * xy;
   }
+
+  /// F_xx, F_yy, F_zz, F_xy, F_xz, F_yz of any body: dipoles at the points of its volume rule.
+  static void full(Body body, double x, double y, double z, double[] into) {
+    double[] sum = new double[6];
+    VolumeAverage.over(
+        body,
+        (px, py, pz, weight) -> {
+          double u = x - px;
+          double v = y - py;
+          double w = z - pz;
+          double square = u * u + v * v + w * w;
+          double factor = weight / (square * square * Math.sqrt(square));
+          sum[0] += factor * (3 * u * u - square);
+          sum[1] += factor * (3 * v * v - square);
+          sum[2] += factor * (3 * w * w - square);
+          sum[3] += factor * 3 * u * v;
+          sum[4] += factor * 3 * u * w;
+          sum[5] += factor * 3 * v * w;
+        });
+    double scale = body.volume() / (4 * Math.PI);
+    for (int n = 0; n < 6; n++) {
+      into[n] = scale * sum[n];
+    }
+  }
 }

@@ -44,20 +44,14 @@ public final class FieldMatrix {
     return perNext[row * slots + slot - 1];
   }
 
-  /// All readings for given polarisations, tesla.
-  ///
-  /// @param out each slot's polarisation along out, slot 1 first
-  /// @param next each slot's polarisation along to next, slot 1 first
-  public double[] apply(double[] out, double[] next) {
-    if (out.length != slots || next.length != slots) {
+  /// All readings for given polarisations, in the unit of the elements times tesla.
+  public double[] apply(RingPolarisation polarisation) {
+    if (polarisation.slots() != slots) {
       throw new IllegalArgumentException(
-          "a ring of "
-              + slots
-              + " slots needs as many polarisations, not "
-              + out.length
-              + " and "
-              + next.length);
+          "a ring of " + slots + " slots needs as many polarisations, not " + polarisation.slots());
     }
+    double[] out = polarisation.outArray();
+    double[] next = polarisation.nextArray();
     double[] readings = new double[rows];
     for (int row = 0; row < rows; row++) {
       double sum = 0;

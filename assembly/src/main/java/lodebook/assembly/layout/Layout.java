@@ -100,4 +100,28 @@ public record Layout(
   public String name() {
     return code + "@" + revision;
   }
+
+  /// The same layout with its magnets at another distance from the axis, metres.
+  Layout withSlotRadius(double metres) {
+    return new Layout(
+        code,
+        revision,
+        polePairs,
+        segmentsPerPolePair,
+        focus,
+        numbering,
+        firstSlotClockDegrees,
+        firstFacing,
+        metres,
+        magnetType,
+        sideMagnetType,
+        workingRadiusMetres,
+        probe,
+        spread,
+        adhesive,
+        adhesiveWorkingMinutes,
+        bodyTurns,
+        insertFrom,
+        workingAmplitudeTolerance);
+  }
 }

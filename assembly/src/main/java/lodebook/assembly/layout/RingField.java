@@ -114,22 +114,8 @@ public final class RingField {
     return combined(0.5 / STEP, ahead, -0.5 / STEP, behind);
   }
 
-  /// F_xx, F_yy, F_xy of slot i's body at a point, all in the slot's frame (x out, y to next, from
-  /// the slot's middle).
   private void tensor(int i, double x, double y, double z, double[] f) {
-    if (turn[i] == 0) {
-      body[i].planarTensor(x, y, z, f, 0);
-      return;
-    }
-    double c = Math.cos(turn[i]);
-    double s = Math.sin(turn[i]);
-    body[i].planarTensor(c * x + s * y, c * y - s * x, z, f, 0);
-    double xx = c * c * f[0] - 2 * c * s * f[2] + s * s * f[1];
-    double yy = s * s * f[0] + 2 * c * s * f[2] + c * c * f[1];
-    double xy = c * s * (f[0] - f[1]) + (c * c - s * s) * f[2];
-    f[0] = xx;
-    f[1] = yy;
-    f[2] = xy;
+    SlotTensor.at(body[i], turn[i], x, y, z, f);
   }
 
   private static void put(

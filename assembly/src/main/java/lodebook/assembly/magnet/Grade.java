@@ -19,4 +19,13 @@ public record Grade(
     double recoilPermeability,
     double highestTemperatureCelsius,
     double densityKilogramPerCubicMetre,
-    String source) {}
+    String source) {
+
+  /// Temperature to which remanences refer, °C.
+  public static final double REFERENCE_CELSIUS = 20;
+
+  /// Remanence at a temperature over that at 20 °C: 1 + α·(T − 20).
+  public double remanenceFactorAt(double celsius) {
+    return 1 + remanencePerKelvin * (celsius - REFERENCE_CELSIUS);
+  }
+}

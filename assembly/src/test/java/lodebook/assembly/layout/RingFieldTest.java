@@ -14,8 +14,7 @@ class RingFieldTest {
   private double read(List<Facing> facings, int slot, Component component) {
     ReadingPlace place =
         ReadingPlace.of(ring.layout(), new ProbePoint(slot, Spot.CENTRE, component));
-    return 1e3
-        * field.at(List.of(place)).apply(Rings.out(facings, 1.3), Rings.next(facings, 1.3))[0];
+    return 1e3 * field.at(List.of(place)).apply(Rings.equal(facings, 1.3))[0];
   }
 
   private List<Facing> reversed(int slot) {

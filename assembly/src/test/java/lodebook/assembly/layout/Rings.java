@@ -1,5 +1,6 @@
 package lodebook.assembly.layout;
 
+import java.util.Arrays;
 import java.util.List;
 import lodebook.assembly.magnet.MagnetType;
 import lodebook.assembly.magnet.Shape;
@@ -10,6 +11,12 @@ public final class Rings {
 
   /// A block type without recoil, sizes in millimetres.
   public static MagnetType block(double thickness, double width, double length) {
+    return block(thickness, width, length, 1.0);
+  }
+
+  /// A block type, sizes in millimetres.
+  public static MagnetType block(
+      double thickness, double width, double length, double recoilPermeability) {
     return new MagnetType(
         "BLK",
         Shape.BLOCK,
@@ -22,8 +29,68 @@ public final class Rings {
         "N42",
         0.05e-3,
         "NiCuNi",
-        1.0,
+        recoilPermeability,
         0);
+  }
+
+  /// A rod type without recoil, sizes in millimetres.
+  public static MagnetType rod(double diameter, double length) {
+    return new MagnetType(
+        "ROD", Shape.ROD, 0, 0, length / 1e3, diameter / 1e3, 0, 0, "N42", 0, "", 1.0, 0);
+  }
+
+  /// A disc type without recoil, sizes in millimetres.
+  public static MagnetType disc(double diameter, double thickness) {
+    return new MagnetType(
+        "DSC", Shape.DISC, thickness / 1e3, 0, 0, diameter / 1e3, 0, 0, "N42", 0, "", 1.0, 0);
+  }
+
+  /// An arc type without recoil, radii and length in millimetres.
+  public static MagnetType arc(double inner, double outer, double degrees, double length) {
+    return arc(inner, outer, degrees, length, 1.0);
+  }
+
+  /// An arc type, radii and length in millimetres.
+  public static MagnetType arc(
+      double inner, double outer, double degrees, double length, double recoilPermeability) {
+    return new MagnetType(
+        "ARC",
+        Shape.ARC,
+        0,
+        0,
+        length / 1e3,
+        2 * outer / 1e3,
+        2 * inner / 1e3,
+        degrees,
+        "N42",
+        0,
+        "",
+        recoilPermeability,
+        0);
+  }
+
+  /// The same layout with bodies that turn with their facing.
+  public static Layout turning(Layout layout) {
+    return new Layout(
+        layout.code(),
+        layout.revision(),
+        layout.polePairs(),
+        layout.segmentsPerPolePair(),
+        layout.focus(),
+        layout.numbering(),
+        layout.firstSlotClockDegrees(),
+        layout.firstFacing(),
+        layout.slotRadiusMetres(),
+        layout.magnetType(),
+        layout.sideMagnetType(),
+        layout.workingRadiusMetres(),
+        layout.probe(),
+        layout.spread(),
+        layout.adhesive(),
+        layout.adhesiveWorkingMinutes(),
+        true,
+        layout.insertFrom(),
+        layout.workingAmplitudeTolerance());
   }
 
   /// A layout with radii in millimetres.
@@ -59,13 +126,10 @@ public final class Rings {
     return new RingDesign(layout(3, 4, Focus.OUT, 10, 13), block(4, 4, 10), null);
   }
 
-  /// Each slot's part of the polarisation along out, for one remanence.
-  public static double[] out(List<Facing> facings, double remanence) {
-    return facings.stream().mapToDouble(f -> remanence * Math.cos(f.radians())).toArray();
-  }
-
-  /// Each slot's part of the polarisation to next, for one remanence.
-  public static double[] next(List<Facing> facings, double remanence) {
-    return facings.stream().mapToDouble(f -> remanence * Math.sin(f.radians())).toArray();
+  /// Facings with one remanence for all slots.
+  public static RingPolarisation equal(List<Facing> facings, double remanence) {
+    double[] remanences = new double[facings.size()];
+    Arrays.fill(remanences, remanence);
+    return RingPolarisation.of(remanences, facings);
   }
 }
