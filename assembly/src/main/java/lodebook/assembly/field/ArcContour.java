@@ -39,7 +39,7 @@ final class ArcContour {
       moved = arc.innerRadiusMetres() - NEAREST;
     }
     double off = arc.angleRadians() / 2 - Math.abs(angle);
-    if (Math.abs(off) * radius < NEAREST) {
+    if (Math.abs(off) * radius < NEAREST && moved > arc.innerRadiusMetres() / 2) {
       turned = Math.copySign(arc.angleRadians() / 2 + NEAREST / moved, angle);
     }
     boolean kept = moved == radius && turned == angle;
