@@ -15,6 +15,7 @@ import org.jspecify.annotations.Nullable;
 /// Draws on a page of a PDF; texts stay texts.
 public final class PdfCanvas implements Canvas {
   private static final double POINTS = 72 / 25.4;
+  private static final char NO_BREAK_SPACE = '\u00A0';
 
   private final PDPageContentStream content;
   private final Typeface typeface;
@@ -168,7 +169,7 @@ public final class PdfCanvas implements Canvas {
       content.beginText();
       content.setFont(lettering.bold() ? bold : plain, (float) lettering.sizePoints());
       content.setTextMatrix(new Matrix(whole));
-      content.showText(line);
+      content.showText(line.replace(NO_BREAK_SPACE, ' '));
       content.endText();
     } catch (IOException broken) {
       throw new UncheckedIOException(broken);

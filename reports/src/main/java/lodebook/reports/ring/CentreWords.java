@@ -20,16 +20,21 @@ final class CentreWords {
         words.say(clockwise ? "ring.clockwise" : "ring.counterclockwise"));
   }
 
-  /// Writes the words in a circle about the axis, if they fit in letters that can be read.
+  /// Writes the words in a circle about the axis, if they fit in letters that can be read; without
+  /// the title if only that is too long.
   ///
-  /// @return whether they did
+  /// @return whether what is said about the view is written
   static boolean draw(Canvas canvas, RingPicture picture, Words words, double radius) {
-    List<String> lines = new ArrayList<>();
-    if (!picture.title().isEmpty()) {
-      lines.add(picture.title());
+    List<String> said = view(picture, words);
+    List<String> all = new ArrayList<>(said);
+    all.addFirst(picture.title());
+    if (!picture.title().isEmpty() && draw(canvas, all, true, radius)) {
+      return true;
     }
-    lines.addAll(view(picture, words));
-    boolean titled = !picture.title().isEmpty();
+    return draw(canvas, said, false, radius);
+  }
+
+  private static boolean draw(Canvas canvas, List<String> lines, boolean titled, double radius) {
     for (double points = 11; points >= LEAST_POINTS; points -= 0.5) {
       if (fits(canvas, lines, titled, points, 0.94 * radius)) {
         write(canvas, lines, titled, points);

@@ -43,22 +43,27 @@ record RingScale(
 
   /// Scales a picture so that all that is drawn round the axis fits a circle.
   static RingScale fitting(RingPicture picture, Typeface typeface, double radiusMillimetres) {
+    double[] magnets = magnetRadii(picture);
     double low = 0;
-    double high = radiusMillimetres / magnetRadii(picture)[1];
+    double high = radiusMillimetres / magnets[1];
     for (int i = 0; i < 30; i++) {
       double middle = (low + high) / 2;
-      if (of(picture, typeface, middle).bandOuter <= radiusMillimetres) {
+      if (of(picture, magnets, typeface, middle).bandOuter <= radiusMillimetres) {
         low = middle;
       } else {
         high = middle;
       }
     }
-    return of(picture, typeface, low);
+    return of(picture, magnets, typeface, low);
   }
 
   /// The radii at a given scale.
   static RingScale of(RingPicture picture, Typeface typeface, double scale) {
-    double[] magnets = magnetRadii(picture);
+    return of(picture, magnetRadii(picture), typeface, scale);
+  }
+
+  private static RingScale of(
+      RingPicture picture, double[] magnets, Typeface typeface, double scale) {
     double inner = scale * magnets[0];
     double outer = scale * magnets[1];
     boolean out = picture.layout().focus() == Focus.OUT;
@@ -107,12 +112,14 @@ record RingScale(
     return lots;
   }
 
+  /// Smallest and largest radius of any magnet, millimetres of the ring.
   private static double[] magnetRadii(RingPicture picture) {
     double near = Double.POSITIVE_INFINITY;
     double far = 0;
     double slotRadius = 1e3 * picture.layout().slotRadiusMetres();
     for (DrawnSlot drawn : picture.slots()) {
-      Shape body = MagnetPainter.body(picture, drawn).outline();
+      MagnetBody magnet = MagnetPainter.body(picture, drawn);
+      Shape body = magnet.outline();
       double[] p = new double[6];
       for (PathIterator i = body.getPathIterator(null, 0.01); !i.isDone(); i.next()) {
         if (i.currentSegment(p) != PathIterator.SEG_CLOSE) {
@@ -121,7 +128,7 @@ record RingScale(
           near = Math.min(near, r);
         }
       }
-      near = Math.min(near, slotRadius - MagnetPainter.body(picture, drawn).reach(Math.PI));
+      near = Math.min(near, slotRadius - magnet.reach(Math.PI));
     }
     return new double[] {Math.max(near, 0), far};
   }

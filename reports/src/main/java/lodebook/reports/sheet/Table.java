@@ -33,11 +33,14 @@ public final class Table {
 
   private final Flow flow;
   private final List<Column> columns;
+  private final List<Row> rows;
   private final double[] left;
 
-  private Table(Flow flow, List<Column> columns) {
+  /// A table across the width of a flow.
+  public Table(Flow flow, List<Column> columns, List<Row> rows) {
     this.flow = flow;
-    this.columns = columns;
+    this.columns = List.copyOf(columns);
+    this.rows = List.copyOf(rows);
     double all = columns.stream().mapToDouble(Column::share).sum();
     left = new double[columns.size() + 1];
     for (int i = 0; i < columns.size(); i++) {
@@ -45,20 +48,24 @@ public final class Table {
     }
   }
 
-  /// Sets a table.
-  public static void set(Flow flow, List<Column> columns, List<Row> rows) {
-    new Table(flow, columns).set(rows);
+  /// Height of the table's head and first two rows, which stay together.
+  public double startHeight() {
+    double start = headHeight();
+    for (int i = 0; i < Math.min(2, rows.size()); i++) {
+      start += height(rows.get(i));
+    }
+    return Math.min(start, flow.pageRoom());
   }
 
-  private void set(List<Row> rows) {
+  /// Sets the table.
+  public void set() {
     double[] heights = rows.stream().mapToDouble(this::height).toArray();
     double head = headHeight();
     for (int i = 0; i < rows.size(); i++) {
       boolean lastTwo = i == rows.size() - 2 && i > 0;
       double need = lastTwo ? heights[i] + heights[i + 1] : heights[i];
       if (i == 0) {
-        double two = head + heights[0] + (rows.size() > 1 ? heights[1] : 0);
-        flow.need(Math.min(two, flow.pageRoom()));
+        flow.need(startHeight());
         head();
       } else if (flow.room() < Math.min(need, flow.pageRoom() - head)) {
         flow.newPage();
@@ -85,7 +92,18 @@ public final class Table {
   }
 
   private List<String> headLines(int column) {
-    return Wrap.lines(columns.get(column).title(), typeface(), HEAD, width(column) - 2 * PAD);
+    return Wrap.lines(
+        columns.get(column).title(), typeface(), headLettering(column), width(column) - 2 * PAD);
+  }
+
+  /// The head's lettering, smaller where a word would not fit its column.
+  private Lettering headLettering(int column) {
+    double widest = 0;
+    for (String word : columns.get(column).title().split(" ")) {
+      widest = Math.max(widest, typeface().width(word, HEAD));
+    }
+    double fit = (width(column) - 2 * PAD) / Math.max(widest, 1e-9);
+    return HEAD.sized(HEAD.sizePoints() * Math.clamp(fit, 0.6, 1));
   }
 
   private void head() {
@@ -95,7 +113,8 @@ public final class Table {
     for (int i = 0; i < columns.size(); i++) {
       double y = PAD;
       for (String line : headLines(i)) {
-        strip.text(line, left[i] + PAD, y + 0.8 * HEAD.sizeMillimetres(), HEAD, Anchor.START);
+        double baseline = y + 0.8 * HEAD.sizeMillimetres();
+        strip.text(line, left[i] + PAD, baseline, headLettering(i), Anchor.START);
         y += LINE * HEAD.sizeMillimetres();
       }
     }
@@ -180,18 +199,10 @@ public final class Table {
     double cells = cellsHeight(row);
     double[] parts = stackHeights(row);
     for (int i = 0; i < columns.size(); i++) {
-      Cell cell = row.cells().get(i);
-      if (cell instanceof Cell.Stack(List<Cell> stacked)) {
-        double y = 0;
-        for (int j = 0; j < stacked.size(); j++) {
-          draw(strip.moved(left[i], y), stacked.get(j), width(i), parts[j]);
-          y += parts[j];
-          if (j < stacked.size() - 1) {
-            strip.stroke(new Line2D.Double(left[i], y, left[i + 1], y), Palette.RULE, 0.15);
-          }
-        }
-      } else {
-        draw(strip.moved(left[i], 0), cell, width(i), cells);
+      if (!(row.cells().get(i) instanceof Cell.Stack)) {
+        draw(strip.moved(left[i], 0), row.cells().get(i), width(i), cells);
+      } else if (i == 0 || !(row.cells().get(i - 1) instanceof Cell.Stack)) {
+        stacks(strip, row, i, parts);
       }
     }
     double y = cells;
@@ -203,6 +214,25 @@ public final class Table {
       strip.stroke(new Line2D.Double(left[i], 0, left[i], cells), Palette.RULE, 0.15);
     }
     strip.stroke(new Line2D.Double(0, height, flow.width(), height), Palette.PENCIL, 0.25);
+  }
+
+  /// Neighbouring stacks from the first on, line by line, so that a reader hears what belongs
+  /// together.
+  private void stacks(Canvas strip, Row row, int first, double[] parts) {
+    double y = 0;
+    for (int j = 0; j < parts.length; j++) {
+      int i = first;
+      for (; i < columns.size(); i++) {
+        if (!(row.cells().get(i) instanceof Cell.Stack(List<Cell> stacked))) {
+          break;
+        }
+        draw(strip.moved(left[i], y), stacked.get(j), width(i), parts[j]);
+      }
+      y += parts[j];
+      if (j < parts.length - 1) {
+        strip.stroke(new Line2D.Double(left[first], y, left[i], y), Palette.RULE, 0.15);
+      }
+    }
   }
 
   private void draw(Canvas place, Cell cell, double width, double height) {

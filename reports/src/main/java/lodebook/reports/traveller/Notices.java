@@ -36,14 +36,15 @@ public final class Notices {
       String adhesive) {
     var notices = new Notices(words);
     notices.collect(type, figures, magnets, adhesive);
-    flow.heading(words.say("notice.title"), 70);
-    flow.paragraph(words.say("notice.deferral"), Lettering.bold(10));
-    flow.gap(1.5);
     var columns =
         List.of(
             new Table.Column(words.say("notice.column.name"), 36),
             new Table.Column(words.say("notice.column.text"), 144));
-    Table.set(flow, columns, notices.rows);
+    var table = new Table(flow, columns, notices.rows);
+    flow.heading(words.say("notice.title"), 12 + table.startHeight());
+    flow.paragraph(words.say("notice.deferral"), Lettering.bold(10));
+    flow.gap(1.5);
+    table.set();
   }
 
   private void collect(MagnetType type, HandlingFigures f, int magnets, String adhesive) {

@@ -29,8 +29,8 @@ final class StepTable {
     this.layout = layout;
   }
 
-  /// Sets the steps.
-  void set(Flow flow, Traveller traveller) {
+  /// The table of steps.
+  Table steps(Flow flow, Traveller traveller) {
     boolean readings = traveller.steps().stream().anyMatch(s -> !s.expected().isEmpty());
     List<Table.Column> columns = new ArrayList<>();
     columns.add(new Table.Column(words.say("step.column.step"), 12.5));
@@ -47,7 +47,7 @@ final class StepTable {
     for (int i = 0; i < traveller.steps().size(); i++) {
       rows.add(row(i + 1, traveller.steps().get(i), readings));
     }
-    Table.set(flow, columns, rows);
+    return new Table(flow, columns, rows);
   }
 
   private Table.Row row(int number, Step step, boolean readings) {
@@ -116,8 +116,8 @@ final class StepTable {
         STRONG);
   }
 
-  /// Sets the readings of the finished ring in the order of slots.
-  void setFinished(Flow flow, List<ExpectedReading> finished) {
+  /// The table of readings of the finished ring.
+  Table finished(Flow flow, List<ExpectedReading> finished) {
     List<Table.Column> columns =
         List.of(
             new Table.Column(words.say("step.column.slot"), 20),
@@ -137,6 +137,6 @@ final class StepTable {
                   new Cell.Box(WRITING)),
               null));
     }
-    Table.set(flow, columns, rows);
+    return new Table(flow, columns, rows);
   }
 }

@@ -11,12 +11,18 @@ import lodebook.reports.canvas.Canvas;
 import lodebook.reports.canvas.Lettering;
 import lodebook.reports.canvas.Wrap;
 import lodebook.reports.sheet.Flow;
+import lodebook.reports.sheet.ScanCode;
 import lodebook.reports.words.Words;
 
 /// The head of a traveller: the rotor's number as large as it fits, and what it is.
 final class TravellerHead {
   private static final Lettering NAME = Lettering.plain(9.5);
   private static final Lettering VALUE = Lettering.bold(11);
+
+  /// Side of the code to scan, millimetres.
+  private static final double CODE = 26;
+
+  private static final double NAME_WIDTH = 27;
 
   private record Fact(String name, String value) {}
 
@@ -33,8 +39,9 @@ final class TravellerHead {
     line.text(words.say("traveller.kind"), 0, 5, Lettering.plain(13), Anchor.START);
     if (traveller.facts().copy() > 1) {
       String copy = words.say("sheet.copy", Integer.toString(traveller.facts().copy()));
-      line.text(copy, flow.width(), 5, Lettering.bold(15), Anchor.END);
+      line.text(copy, flow.width() - CODE, 5, Lettering.bold(15), Anchor.END);
     }
+    ScanCode.draw(line.moved(flow.width() - CODE + 2, -2), traveller.facts().code(), CODE);
     number(flow);
     facts(flow);
   }
@@ -42,14 +49,17 @@ final class TravellerHead {
   private void number(Flow flow) {
     String code = traveller.facts().code();
     Lettering lettering = Lettering.bold(40);
-    while (lettering.sizePoints() > 18 && flow.typeface().width(code, lettering) > flow.width()) {
+    while (lettering.sizePoints() > 18
+        && flow.typeface().width(code, lettering) > flow.width() - CODE) {
       lettering = lettering.sized(lettering.sizePoints() - 1);
     }
-    for (String part : Wrap.lines(code, flow.typeface(), lettering, flow.width())) {
+    double beside = CODE - 8;
+    for (String part : Wrap.lines(code, flow.typeface(), lettering, flow.width() - CODE)) {
       double height = 1.16 * lettering.sizeMillimetres();
+      beside -= height;
       flow.take(height).text(part, 0, 0.86 * height, lettering, Anchor.START);
     }
-    flow.gap(2);
+    flow.gap(Math.max(2, beside));
   }
 
   private List<Fact> collect() {
@@ -82,8 +92,8 @@ final class TravellerHead {
             words.say("fact.probe"),
             words.say(
                 "fact.probe.at",
-                words.number(1e3 * layout.probe().radiusMetres(), 2),
-                words.signed(1e3 * layout.probe().heightMetres(), 2))));
+                words.trimmed(1e3 * layout.probe().radiusMetres(), 2),
+                words.trimmed(1e3 * layout.probe().heightMetres(), 2))));
     return facts;
   }
 
@@ -137,8 +147,6 @@ final class TravellerHead {
       }
     }
   }
-
-  private static final double NAME_WIDTH = 27;
 
   private static List<String> lines(Flow flow, Fact fact, double column) {
     return Wrap.lines(fact.value(), flow.typeface(), VALUE, column - NAME_WIDTH);

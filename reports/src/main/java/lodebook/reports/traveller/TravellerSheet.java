@@ -17,6 +17,7 @@ import lodebook.reports.ring.RingPicture;
 import lodebook.reports.ring.RingSizes;
 import lodebook.reports.sheet.Flow;
 import lodebook.reports.sheet.Sheet;
+import lodebook.reports.sheet.Table;
 import lodebook.reports.words.Words;
 
 /// Writes the traveller of a rotor as a PDF/A-2b file.
@@ -61,15 +62,18 @@ public final class TravellerSheet {
         traveller.handling(),
         traveller.layout().slots(),
         traveller.layout().adhesive());
+    var tables = new StepTable(words, traveller.layout());
+    Table steps = tables.steps(flow, traveller);
     flow.heading(
-        words.say(traveller.inFillingOrder() ? "step.title.filling" : "step.title.slots"), 40);
+        words.say(traveller.inFillingOrder() ? "step.title.filling" : "step.title.slots"),
+        20 + steps.startHeight());
     flow.paragraph(words.say("step.explained"), Lettering.plain(11));
     flow.gap(1.5);
-    var table = new StepTable(words, traveller.layout());
-    table.set(flow, traveller);
+    steps.set();
     if (!traveller.finished().isEmpty()) {
-      flow.heading(words.say("finished.title"), 30);
-      table.setFinished(flow, traveller.finished());
+      Table finished = tables.finished(flow, traveller.finished());
+      flow.heading(words.say("finished.title"), finished.startHeight());
+      finished.set();
     }
     signatures();
   }

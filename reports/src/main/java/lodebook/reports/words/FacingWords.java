@@ -31,7 +31,8 @@ public final class FacingWords {
       return words.say("facing.leaning", radial, neighbour);
     }
     double lean = Math.abs(facing.degreesFrom(out ? Facing.OUT : Facing.IN));
-    return words.say("facing.between", degrees(lean), radial, neighbour);
+    String from = words.say(out ? "facing.from.out" : "facing.from.in");
+    return words.say("facing.between", degrees(lean), from, neighbour);
   }
 
   private String goal(Layout layout, int slot, int quarter) {

@@ -49,4 +49,18 @@ public final class Words {
     boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
     return value > 0 && !zero ? "+" + text : text;
   }
+
+  /// A number with at most so many decimals, without zeros at its end.
+  public String trimmed(double value, int mostDecimals) {
+    int decimals = mostDecimals;
+    while (decimals > 0 && Math.abs(value - rounded(value, decimals - 1)) < 1e-9) {
+      decimals--;
+    }
+    return number(value, decimals);
+  }
+
+  private static double rounded(double value, int decimals) {
+    double power = Math.pow(10, decimals);
+    return Math.rint(value * power) / power;
+  }
 }
