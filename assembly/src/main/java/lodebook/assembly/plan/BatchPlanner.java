@@ -2,6 +2,8 @@ package lodebook.assembly.plan;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
@@ -21,15 +23,11 @@ public final class BatchPlanner {
 
   private final BatchTask task;
   private final HarmonicForm[] forms;
-  private final Map<String, List<BatchLots.Bucket>> buckets = new LinkedHashMap<>();
 
   /// @param task what is asked
   public BatchPlanner(BatchTask task) {
     this.task = task;
     forms = forms(task);
-    for (String type : task.types()) {
-      buckets.put(type, new BatchLots(task, type).buckets());
-    }
   }
 
   /// What is short before anything can be planned, type by type.
@@ -57,7 +55,7 @@ public final class BatchPlanner {
     if (!shortages.isEmpty()) {
       throw new IllegalArgumentException("pieces are short for the batch: " + shortages);
     }
-    BatchHolders holders = new BatchHolders(task, forms, buckets);
+    BatchHolders holders = new BatchHolders(task, forms, buckets(task));
     BatchPuzzle puzzle = holders.puzzle();
     int[] order = new BatchAnnealing(puzzle, seed, effort).search(holders.dealt());
     Map<String, RotorPlan> plans = new LinkedHashMap<>();
@@ -82,6 +80,43 @@ public final class BatchPlanner {
             .map(Candidate::piece)
             .filter(piece -> !used.contains(piece))
             .toList());
+  }
+
+  /// Plans beside the same stock as it comes and sorted by strength, each rotor from its own lots.
+  public Map<Arranged, Map<String, RingFigures>> compare(BatchPlan plan) {
+    List<Candidate> strongestFirst = new ArrayList<>(task.candidates());
+    strongestFirst.sort(
+        Comparator.comparingDouble((Candidate each) -> -each.strength().remanenceTesla()));
+    BatchTask sorted = new BatchTask(task.rings(), strongestFirst, task.unmeasured(), task.mix());
+    Map<String, RingFigures> planned = new LinkedHashMap<>();
+    plan.plans().forEach((rotor, each) -> planned.put(rotor, RingFigures.of(each)));
+    Map<Arranged, Map<String, RingFigures>> figures = new EnumMap<>(Arranged.class);
+    figures.put(Arranged.AS_THEY_COME, plain(task));
+    figures.put(Arranged.SORTED, plain(sorted));
+    figures.put(Arranged.PLANNED, planned);
+    return figures;
+  }
+
+  private Map<String, RingFigures> plain(BatchTask inOrder) {
+    BatchHolders holders = new BatchHolders(inOrder, forms, buckets(inOrder));
+    Map<String, RingFigures> figures = new LinkedHashMap<>();
+    for (int ring = 0; ring < forms.length; ring++) {
+      List<Source> sources = holders.asTheyCome(ring);
+      figures.put(
+          task.rings().get(ring).rotor(),
+          new RingFigures(
+              unwanted(forms[ring], sources),
+              forms[ring].workingAmplitude(strengths(sources))));
+    }
+    return figures;
+  }
+
+  private static Map<String, List<BatchLots.Bucket>> buckets(BatchTask task) {
+    Map<String, List<BatchLots.Bucket>> buckets = new LinkedHashMap<>();
+    for (String type : task.types()) {
+      buckets.put(type, new BatchLots(task, type).buckets());
+    }
+    return buckets;
   }
 
   private RotorPlan plan(int ring, BatchHolders holders, int[] order, long seed) {
@@ -128,14 +163,14 @@ public final class BatchPlanner {
   }
 
   private static HarmonicForm[] forms(BatchTask task) {
-    Map<RingDesign, RingHarmonics> byRule = new HashMap<>();
+    Map<RingDesign, SlotHarmonics> byRule = new HashMap<>();
     Map<RingDesign, HarmonicForm> known = new HashMap<>();
     HarmonicForm[] forms = new HarmonicForm[task.rings().size()];
     for (int ring = 0; ring < forms.length; ring++) {
       BatchTask.Ring each = task.rings().get(ring);
       RingDesign design = each.design();
-      RingHarmonics ideal =
-          byRule.computeIfAbsent(design, d -> RingHarmonics.of(d, d.ruleFacings()));
+      SlotHarmonics ideal =
+          byRule.computeIfAbsent(design, d -> SlotHarmonics.of(d, d.ruleFacings()));
       List<String> types = task.types();
       int[] pool = new int[design.slots()];
       Arrays.setAll(pool, i -> types.indexOf(design.layout().typeAt(i + 1)));
@@ -144,7 +179,7 @@ public final class BatchPlanner {
       } else {
         List<Facing> facings = new ArrayList<>(design.ruleFacings());
         each.kept().forEach(kept -> facings.set(kept.slot() - 1, kept.facing()));
-        forms[ring] = HarmonicForm.of(RingHarmonics.of(design, facings), ideal, pool);
+        forms[ring] = HarmonicForm.of(SlotHarmonics.of(design, facings), ideal, pool);
       }
     }
     return forms;

@@ -25,7 +25,7 @@ final class HarmonicForm {
   /// @param asPlaced harmonics with the facings that the magnets have or are to have
   /// @param byRule harmonics with every facing by the rule
   /// @param pool for each slot the index of its magnet type, from 0
-  static HarmonicForm of(RingHarmonics asPlaced, RingHarmonics byRule, int[] pool) {
+  static HarmonicForm of(SlotHarmonics asPlaced, SlotHarmonics byRule, int[] pool) {
     int n = asPlaced.slots();
     double[] q = new double[n * n];
     double[] working = new double[n];
@@ -52,7 +52,7 @@ final class HarmonicForm {
   }
 
   private static void subtractIdeal(
-      RingHarmonics byRule, int h, int[] pool, double[] re, double[] im) {
+      SlotHarmonics byRule, int h, int[] pool, double[] re, double[] im) {
     int n = pool.length;
     int pools = 0;
     for (int each : pool) {

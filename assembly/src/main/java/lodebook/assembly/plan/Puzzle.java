@@ -1,6 +1,7 @@
 package lodebook.assembly.plan;
 
 import java.util.Arrays;
+import java.util.Comparator;
 
 /// The planner's question in bare numbers: pieces on holders, the first holders being the slots.
 ///
@@ -71,6 +72,23 @@ final class Puzzle {
   int[] asTheyCome() {
     int[] order = new int[holders()];
     Arrays.setAll(order, i -> i);
+    return order;
+  }
+
+  /// The order in which the strongest piece of each pool sits on its first holder, and so on.
+  int[] sorted() {
+    int[] order = asTheyCome();
+    for (int[] pool : pools) {
+      int[] pieces =
+          Arrays.stream(pool)
+              .boxed()
+              .sorted(Comparator.comparingDouble(piece -> -strength[piece]))
+              .mapToInt(piece -> piece)
+              .toArray();
+      for (int i = 0; i < pool.length; i++) {
+        order[pool[i]] = pieces[i];
+      }
+    }
     return order;
   }
 

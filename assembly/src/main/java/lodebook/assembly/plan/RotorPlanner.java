@@ -3,8 +3,10 @@ package lodebook.assembly.plan;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
@@ -32,19 +34,19 @@ public final class RotorPlanner {
   /// @param design the ring's layout with its magnet types
   /// @param task what is asked of that layout
   public static RotorPlanner of(RingDesign design, RotorTask task) {
-    RingHarmonics byRule = RingHarmonics.of(design, design.ruleFacings());
+    SlotHarmonics byRule = SlotHarmonics.of(design, design.ruleFacings());
     if (task.kept().isEmpty()) {
       return new RotorPlanner(task, byRule, byRule);
     }
     List<Facing> facings = new ArrayList<>(design.ruleFacings());
     task.kept().forEach(kept -> facings.set(kept.slot() - 1, kept.facing()));
-    return new RotorPlanner(task, RingHarmonics.of(design, facings), byRule);
+    return new RotorPlanner(task, SlotHarmonics.of(design, facings), byRule);
   }
 
   /// @param task what is asked
   /// @param asPlaced harmonics of the task's ring, kept magnets facing as they were built
   /// @param byRule harmonics of the same ring with every facing by the rule
-  public RotorPlanner(RotorTask task, RingHarmonics asPlaced, RingHarmonics byRule) {
+  public RotorPlanner(RotorTask task, SlotHarmonics asPlaced, SlotHarmonics byRule) {
     this.task = task;
     int[] pool = new int[task.layout().slots()];
     Arrays.setAll(pool, i -> task.types().indexOf(task.layout().typeAt(i + 1)));
@@ -94,6 +96,21 @@ public final class RotorPlanner {
         withinTolerance,
         Stocked.lotsOf(placements),
         freelyMixed(placements, seed, effort));
+  }
+
+  /// A plan beside the same stock as it comes and sorted by strength; kept slots stay.
+  public Map<Arranged, RingFigures> compare(RotorPlan plan) {
+    Puzzle puzzle = stocked(Set.copyOf(plan.lots())).puzzle();
+    Map<Arranged, RingFigures> figures = new EnumMap<>(Arranged.class);
+    figures.put(Arranged.AS_THEY_COME, figures(puzzle, puzzle.asTheyCome()));
+    figures.put(Arranged.SORTED, figures(puzzle, puzzle.sorted()));
+    figures.put(Arranged.PLANNED, RingFigures.of(plan));
+    return figures;
+  }
+
+  private RingFigures figures(Puzzle puzzle, int[] order) {
+    return new RingFigures(
+        puzzle.unwanted(order), form.workingAmplitude(puzzle.inSlots(order)));
   }
 
   /// The best order there is where the puzzle is small enough to prove it, else null.

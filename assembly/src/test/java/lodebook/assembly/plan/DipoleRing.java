@@ -36,7 +36,7 @@ final class DipoleRing {
   }
 
   /// What each slot gives to the harmonics, for a planner.
-  RingHarmonics harmonics(double[] facingDegrees) {
+  SlotHarmonics harmonics(double[] facingDegrees) {
     int highest = points / 3;
     double[][] re = new double[highest + 1][layout.slots()];
     double[][] im = new double[highest + 1][layout.slots()];
@@ -49,7 +49,7 @@ final class DipoleRing {
         im[h][i] = c[1];
       }
     }
-    return new RingHarmonics(layout.polePairs(), layout.segmentsPerPolePair(), re, im);
+    return new SlotHarmonics(layout.polePairs(), layout.segmentsPerPolePair(), re, im);
   }
 
   /// Unwanted harmonics over the working wave, from the fields alone: the placed ring's less the

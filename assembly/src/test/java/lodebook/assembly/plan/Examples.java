@@ -80,7 +80,7 @@ final class Examples {
   static RotorPlanner planner(RotorTask task) {
     DipoleRing ring = ring(task.layout());
     double[] facings = ring.ruleFacings();
-    RingHarmonics byRule = ring.harmonics(facings);
+    SlotHarmonics byRule = ring.harmonics(facings);
     for (Kept kept : task.kept()) {
       facings[kept.slot() - 1] = kept.facing().degrees();
     }

@@ -52,7 +52,7 @@ class ProofTest {
   void noPlanGoesBelowTheBoundOfRelaxation(int p, int k, int pieces) {
     Layout layout = Examples.layout(p, k, Focus.OUT, null);
     for (int seed = 0; seed < 5; seed++) {
-      RingHarmonics ring = Examples.ring(layout).harmonics(Examples.ring(layout).ruleFacings());
+      SlotHarmonics ring = Examples.ring(layout).harmonics(Examples.ring(layout).ruleFacings());
       Puzzle puzzle = puzzle(ring, Examples.lot("L", "MAIN", pieces, 1.3, seed));
       HarmlessClasses classes = new HarmlessClasses(puzzle, k);
       Double bound = LowerBound.of(puzzle, classes);
@@ -96,7 +96,7 @@ class ProofTest {
     assertEquals(plan.unwantedHarmonics(), plan.lowerBound());
   }
 
-  private static Puzzle puzzle(RingHarmonics ring, List<Candidate> stock) {
+  private static Puzzle puzzle(SlotHarmonics ring, List<Candidate> stock) {
     HarmonicForm form = HarmonicForm.of(ring, ring, new int[ring.slots()]);
     double[] strength =
         stock.stream().mapToDouble(each -> each.strength().remanenceTesla()).toArray();
@@ -106,7 +106,7 @@ class ProofTest {
   }
 
   private static double bestOfAll(Layout layout, List<Candidate> stock) {
-    RingHarmonics ring = Examples.ring(layout).harmonics(Examples.ring(layout).ruleFacings());
+    SlotHarmonics ring = Examples.ring(layout).harmonics(Examples.ring(layout).ruleFacings());
     HarmonicForm form = HarmonicForm.of(ring, ring, new int[layout.slots()]);
     double[] strength =
         stock.stream().mapToDouble(each -> each.strength().remanenceTesla()).toArray();

@@ -20,12 +20,12 @@ import lodebook.assembly.magnet.MagnetType;
 import lodebook.assembly.magnet.Shape;
 import org.junit.jupiter.api.Test;
 
-class RingHarmonicsTest {
+class SlotHarmonicsTest {
 
   /// Source: two independent programs, blocks 4 × 4 × 10 mm of 1.3 T, permeability 1, 12 slots.
   @Test
   void theRingOfTheExampleCases() {
-    RingHarmonics ring = ring(3, 4, Focus.OUT, 10e-3, 13e-3, 4e-3, 10e-3);
+    SlotHarmonics ring = ring(3, 4, Focus.OUT, 10e-3, 13e-3, 4e-3, 10e-3);
     assertEquals(0.4248, amplitude(ring, 3, 1.3), 0.00005);
     assertEquals(0.0515, amplitude(ring, 15, 1.3), 0.00005);
     assertEquals(0.0276, amplitude(ring, 27, 1.3), 0.00005);
@@ -36,7 +36,7 @@ class RingHarmonicsTest {
     for (int k : new int[] {2, 3, 4, 5, 6, 8}) {
       int segments = k;
       double[][] none = new double[200][3 * k];
-      RingHarmonics ring = new RingHarmonics(3, k, none, none);
+      SlotHarmonics ring = new SlotHarmonics(3, k, none, none);
       List<Integer> byDefinition =
           IntStream.range(0, 200)
               .filter(
@@ -56,11 +56,11 @@ class RingHarmonicsTest {
         "harmonics up to 3 don't reach the working wave 4",
         assertThrows(
                 IllegalArgumentException.class,
-                () -> new RingHarmonics(4, 4, new double[4][16], new double[4][16]))
+                () -> new SlotHarmonics(4, 4, new double[4][16], new double[4][16]))
             .getMessage());
   }
 
-  private static double amplitude(RingHarmonics ring, int order, double remanence) {
+  private static double amplitude(SlotHarmonics ring, int order, double remanence) {
     double re = 0;
     double im = 0;
     for (int i = 0; i < ring.slots(); i++) {
@@ -70,7 +70,7 @@ class RingHarmonicsTest {
     return 2 * remanence * Math.hypot(re, im);
   }
 
-  private static RingHarmonics ring(
+  private static SlotHarmonics ring(
       int p, int k, Focus focus, double radius, double working, double size, double length) {
     Layout layout =
         new Layout(
@@ -97,6 +97,6 @@ class RingHarmonicsTest {
         new MagnetType(
             "MAIN", Shape.BLOCK, size, size, length, 0, 0, 0, "N42", 0.05e-3, "nickel", 1, 0);
     RingDesign design = new RingDesign(layout, block, null);
-    return RingHarmonics.of(design, design.ruleFacings());
+    return SlotHarmonics.of(design, design.ruleFacings());
   }
 }

@@ -1,20 +1,19 @@
 package lodebook.assembly.plan;
 
 import java.util.List;
-import java.util.stream.IntStream;
-import lodebook.assembly.layout.Component;
 import lodebook.assembly.layout.Facing;
-import lodebook.assembly.layout.FieldMatrix;
-import lodebook.assembly.layout.ReadingPlace;
+import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.RingDesign;
-import lodebook.assembly.layout.RingField;
+import lodebook.assembly.layout.RingHarmonics;
+import lodebook.assembly.layout.RingPolarisation;
+import lodebook.assembly.layout.Spectrum;
 
 /// What each slot's magnet gives to the harmonics of a ring's radial field on the working circle.
 ///
 /// The radial flux density at mid-height on the working circle is B(φ) = Σ_h c_h e^{ihφ}, and with
 /// every facing fixed c_h = Σ_i a_{h,i} s_i, s_i the remanence of the magnet in slot i. This holds
 /// with recoil permeability too, since each magnetisation answers linearly to the field.
-public final class RingHarmonics {
+public final class SlotHarmonics {
   private final int polePairs;
   private final int segmentsPerPolePair;
   private final double[][] real;
@@ -24,7 +23,7 @@ public final class RingHarmonics {
   /// @param segmentsPerPolePair magnets k per pole pair
   /// @param real real parts of a_{h,i}, first index h from 0, second index slot − 1, tesla a tesla
   /// @param imaginary imaginary parts, same shape
-  public RingHarmonics(
+  public SlotHarmonics(
       int polePairs, int segmentsPerPolePair, double[][] real, double[][] imaginary) {
     if (real.length <= polePairs || imaginary.length != real.length) {
       throw new IllegalArgumentException(
@@ -36,52 +35,24 @@ public final class RingHarmonics {
     this.imaginary = copy(imaginary);
   }
 
-  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first.
-  ///
-  /// The field is sampled at 12 places a slot, at least 240; harmonics above half of that are left
-  /// out. At a gap g to the working circle of radius r they have fallen by more than e^(−120·g/r).
-  public static RingHarmonics of(RingDesign design, List<Facing> facings) {
-    int places = Math.max(12 * design.slots(), 240);
-    double radius = design.layout().workingRadiusMetres();
-    FieldMatrix field =
-        new RingField(design, facings)
-            .at(
-                IntStream.range(0, places)
-                    .mapToObj(
-                        t ->
-                            new ReadingPlace(radius, 2 * Math.PI * t / places, 0, Component.RADIAL))
-                    .toList());
-    double[][] real = new double[places / 2][design.slots()];
-    double[][] imaginary = new double[places / 2][design.slots()];
-    double[] cosine = new double[places];
-    double[] sine = new double[places];
-    for (int t = 0; t < places; t++) {
-      cosine[t] = Math.cos(2 * Math.PI * t / places) / places;
-      sine[t] = Math.sin(2 * Math.PI * t / places) / places;
-    }
-    double[] samples = new double[places];
-    for (int i = 0; i < design.slots(); i++) {
-      double out = Math.cos(facings.get(i).radians());
-      double next = Math.sin(facings.get(i).radians());
-      for (int t = 0; t < places; t++) {
-        samples[t] = out * field.perOut(t, i + 1) + next * field.perNext(t, i + 1);
-      }
-      for (int h = 0; h < places / 2; h++) {
-        double re = 0;
-        double im = 0;
-        for (int t = 0, at = 0; t < places; t++) {
-          re += samples[t] * cosine[at];
-          im -= samples[t] * sine[at];
-          at += h;
-          if (at >= places) {
-            at -= places;
-          }
-        }
-        real[h][i] = re;
-        imaginary[h][i] = im;
+  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first; magnets answer to
+  /// each other's field as their type's recoil permeability says.
+  public static SlotHarmonics of(RingDesign design, List<Facing> facings) {
+    RingHarmonics ring = new RingHarmonics(design);
+    MutualMagnetisation mutual = MutualMagnetisation.of(design);
+    int slots = design.slots();
+    double[][] real = new double[ring.highest() + 1][slots];
+    double[][] imaginary = new double[ring.highest() + 1][slots];
+    for (int i = 0; i < slots; i++) {
+      double[] one = new double[slots];
+      one[i] = 1;
+      Spectrum spectrum = ring.spectrum(mutual.answerTo(RingPolarisation.of(one, facings)));
+      for (int h = 0; h <= ring.highest(); h++) {
+        real[h][i] = spectrum.re(h);
+        imaginary[h][i] = spectrum.im(h);
       }
     }
-    return new RingHarmonics(
+    return new SlotHarmonics(
         design.layout().polePairs(), design.layout().segmentsPerPolePair(), real, imaginary);
   }
 
