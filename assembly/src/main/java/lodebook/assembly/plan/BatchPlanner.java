@@ -105,8 +105,7 @@ public final class BatchPlanner {
       figures.put(
           task.rings().get(ring).rotor(),
           new RingFigures(
-              unwanted(forms[ring], sources),
-              forms[ring].workingAmplitude(strengths(sources))));
+              unwanted(forms[ring], sources), forms[ring].workingAmplitude(strengths(sources))));
     }
     return figures;
   }

@@ -6,7 +6,8 @@ import java.util.Set;
 import java.util.TreeSet;
 import lodebook.assembly.layout.RingDesign;
 
-/// The order in which the empty slots of a ring are filled, and what each magnet does on its way in.
+/// The order in which the empty slots of a ring are filled, and what each magnet does on its way
+/// in.
 ///
 /// Of the patterns a person can follow, begun at each slot of a pole pair, the one is taken whose
 /// greatest force out of a pocket is least, be it on the magnet going in or on its neighbours.
@@ -29,16 +30,13 @@ public record FillingOrder(OrderPattern pattern, List<FillingStep> steps) {
   /// @param design the ring
   /// @param remanencesTesla of what stands or is to stand in each slot, slot 1 first, tesla
   /// @param filled slots that are filled already
-  public static FillingOrder of(
-      RingDesign design, double[] remanencesTesla, Set<Integer> filled) {
+  public static FillingOrder of(RingDesign design, double[] remanencesTesla, Set<Integer> filled) {
     StepForces forces = new StepForces(design, new UnitForces(design), remanencesTesla);
     FillingOrder best = null;
     for (OrderPattern pattern : OrderPattern.values()) {
       for (int start = 1; start <= design.layout().segmentsPerPolePair(); start++) {
         FillingOrder order =
-            new FillingOrder(
-                pattern,
-                steps(forces, filled, pattern.from(start, design.slots())));
+            new FillingOrder(pattern, steps(forces, filled, pattern.from(start, design.slots())));
         if (best == null || order.worstPushOut() < best.worstPushOut() - WORTH_A_HARDER_ORDER) {
           best = order;
         }

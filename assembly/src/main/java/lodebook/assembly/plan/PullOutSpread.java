@@ -4,8 +4,8 @@ package lodebook.assembly.plan;
 ///
 /// Model: the torque comes of the inner ring's working wave meeting the outer ring's through the
 /// modulator, so it is proportional to the product of the two amplitudes. It says nothing of the
-/// torque itself, and leaves out saturation of the iron, differences in gaps, lengths and modulators,
-/// and temperature.
+/// torque itself, and leaves out saturation of the iron, differences in gaps, lengths and
+/// modulators, and temperature.
 public final class PullOutSpread {
   private PullOutSpread() {}
 

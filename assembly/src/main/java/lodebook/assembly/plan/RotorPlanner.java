@@ -109,8 +109,7 @@ public final class RotorPlanner {
   }
 
   private RingFigures figures(Puzzle puzzle, int[] order) {
-    return new RingFigures(
-        puzzle.unwanted(order), form.workingAmplitude(puzzle.inSlots(order)));
+    return new RingFigures(puzzle.unwanted(order), form.workingAmplitude(puzzle.inSlots(order)));
   }
 
   /// The best order there is where the puzzle is small enough to prove it, else null.

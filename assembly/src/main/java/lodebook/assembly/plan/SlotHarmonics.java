@@ -35,8 +35,8 @@ public final class SlotHarmonics {
     this.imaginary = copy(imaginary);
   }
 
-  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first; magnets answer to
-  /// each other's field as their type's recoil permeability says.
+  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first; magnets answer
+  /// to each other's field as their type's recoil permeability says.
   public static SlotHarmonics of(RingDesign design, List<Facing> facings) {
     RingHarmonics ring = new RingHarmonics(design);
     MutualMagnetisation mutual = MutualMagnetisation.of(design);

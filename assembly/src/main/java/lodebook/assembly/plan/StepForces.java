@@ -72,8 +72,7 @@ final class StepForces {
 
   private List<SlotForce> neighbours(int slot, Set<Integer> standing) {
     List<SlotForce> neighbours = new ArrayList<>();
-    for (int neighbour :
-        new int[] {design.layout().previous(slot), design.layout().next(slot)}) {
+    for (int neighbour : new int[] {design.layout().previous(slot), design.layout().next(slot)}) {
       if (standing.contains(neighbour) && neighbour != slot) {
         neighbours.add(onNeighbour(neighbour, slot, standing));
       }

@@ -1,6 +1,8 @@
 package lodebook.assembly.plan;
 
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import lodebook.assembly.field.Load;
 import lodebook.assembly.field.Pose;
 import lodebook.assembly.field.PosedBody;
@@ -9,10 +11,9 @@ import lodebook.assembly.field.Vector3;
 import lodebook.assembly.layout.InsertFrom;
 import lodebook.assembly.layout.RingDesign;
 import lodebook.assembly.magnet.MagnetType;
-import org.jspecify.annotations.Nullable;
 
-/// Forces between the magnets of a ring, pair by pair, for a remanence of 1 T each: one stands where
-/// it belongs, the other there or drawn out of its pocket by some part of its size.
+/// Forces between the magnets of a ring, pair by pair, for a remanence of 1 T each: one stands
+/// where it belongs, the other there or drawn out of its pocket by some part of its size.
 ///
 /// Facings are those of the rule and polarisations stay as they are, whatever the field (recoil
 /// makes forces a few per cent smaller). Magnets more than twelve slots away are left out.
@@ -25,13 +26,12 @@ final class UnitForces {
   private final RingDesign design;
   private final int slots;
   private final int period;
-  private final @Nullable Vector3[][][] known;
+  private final Map<Integer, Vector3[]> known = new HashMap<>();
 
   UnitForces(RingDesign design) {
     this.design = design;
     slots = design.slots();
     period = design.layout().segmentsPerPolePair();
-    known = new Vector3[period][slots][];
   }
 
   /// Force on one magnet from another in the first one's slot directions (radial, to next, axial),
@@ -42,12 +42,9 @@ final class UnitForces {
   Vector3[] on(int slot, int from) {
     int apart = Math.floorMod(from - slot, slots);
     int kind = (slot - 1) % period;
-    Vector3[] forces = known[kind][apart];
-    if (forces == null) {
-      forces = computed(kind + 1, (kind + apart) % slots + 1, Math.min(apart, slots - apart));
-      known[kind][apart] = forces;
-    }
-    return forces;
+    return known.computeIfAbsent(
+        kind * slots + apart,
+        key -> computed(kind + 1, (kind + apart) % slots + 1, Math.min(apart, slots - apart)));
   }
 
   private Vector3[] computed(int slot, int from, int distance) {
