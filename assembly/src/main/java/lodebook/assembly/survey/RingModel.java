@@ -82,4 +82,11 @@ final class RingModel {
     }
     return sum;
   }
+
+  /// Response of a row to every magnet, two numbers per slot.
+  double[] fluxOf(Row row) {
+    return responseAt(
+            ReadingPlace.of(layout(), row.point(), row.radiusMetres(), row.heightMetres()))
+        .flux();
+  }
 }

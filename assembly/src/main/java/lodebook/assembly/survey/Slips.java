@@ -14,8 +14,9 @@ final class Slips {
   private static final double EQUAL = Math.log(20);
   private static final double AS_SET_WINS_BY = Math.log(1000);
   private static final double ROUGHLY_LIKE = 0.1;
-  private static final double WITH_A_FAULT = 0.8;
-  private static final int SEARCHED = 6;
+  private static final double WITH_A_FAULT = 2;
+  private static final int STRAINED_FAULTS = 3;
+  private static final double STRAINED_FIT = 1e-3;
 
   private final RingModel ring;
   private final List<Reading> readings;
@@ -36,17 +37,23 @@ final class Slips {
   Account account() {
     RowModel asSet = rows(Slip.NONE);
     Account plain = new Account(Slip.NONE, asSet, Search.explain(asSet, priors), List.of());
-    List<Tried> right = tried(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE);
-    Account chosen = plain;
-    Tried slipped = likeliest(right);
-    if (slipped != null
-        && (!plain.fits()
-            || slipped.logWeight(priors) > plain.best().logWeight() + AS_SET_WINS_BY)) {
-      chosen = searched(slipped.slip());
-    } else if (!plain.fits()) {
-      chosen = slippedWithFaults(plain);
+    List<Tried> tried = new ArrayList<>(tried(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE));
+    if (isStrained(plain)) {
+      tried.addAll(triedWithOneFault());
     }
-    return withAlternatives(chosen);
+    Tried slipped = likeliest(tried);
+    boolean slipWins =
+        slipped != null
+            && (!plain.fits()
+                || slipped.logWeight(priors) > plain.best().logWeight() + AS_SET_WINS_BY);
+    return withAlternatives(slipWins && slipped != null ? searched(slipped.slip()) : plain);
+  }
+
+  /// Whether an explanation needs so much that a slip with one fault might do better.
+  private static boolean isStrained(Account account) {
+    return !account.fits()
+        || account.best().explanation().faults().size() >= STRAINED_FAULTS
+        || account.best().fitProbability() < STRAINED_FIT;
   }
 
   private @Nullable Tried likeliest(List<Tried> tried) {
@@ -61,20 +68,53 @@ final class Slips {
     return new Account(slip, rows, Search.explain(rows, priors), List.of());
   }
 
-  private Account slippedWithFaults(Account plain) {
-    Account best = plain;
-    double bestWeight = Double.NEGATIVE_INFINITY;
-    List<Tried> tried = new ArrayList<>(tried(Slip.NONE, Explanation.NONE, WITH_A_FAULT));
-    tried.sort(Comparator.comparingDouble(t -> -t.logWeight(priors)));
-    for (Tried one : tried.subList(0, Math.min(SEARCHED, tried.size()))) {
-      Account account = searched(one.slip());
-      double weight = account.best().logWeight() + one.slip().logPrior(priors, ring.slots());
-      if (account.fits() && weight > bestWeight) {
-        best = account;
-        bestWeight = weight;
+  /// Every slip with every single fault that leaves little of the readings' energy unexplained.
+  private List<Tried> triedWithOneFault() {
+    double[] right = ring.rightPolarisation();
+    List<Tried> tried = new ArrayList<>();
+    for (Slip slip : Slip.all(ring.slots())) {
+      if (slip.equals(Slip.NONE)) {
+        continue;
+      }
+      List<Row> rows = slip.rows(readings, ring.layout());
+      double[] rest = new double[rows.size()];
+      double energy = 0;
+      double left = 0;
+      for (int i = 0; i < rest.length; i++) {
+        double expected = ring.expected(rows.get(i), right);
+        rest[i] = rows.get(i).fluxTesla() - expected;
+        energy += expected * expected;
+        left += rest[i] * rest[i];
+      }
+      if (left > WITH_A_FAULT * energy) {
+        continue;
+      }
+      for (int slot = 0; slot < ring.slots(); slot++) {
+        for (Fault fault : Possible.of(ring, slot)) {
+          if (afterFault(rows, rest, fault, right) < ROUGHLY_LIKE * energy) {
+            RowModel model = new RowModel(ring, rows);
+            Explanation single = Explanation.NONE.with(fault);
+            tried.add(new Tried(slip, model, new Judge(model, priors).judge(single)));
+          }
+        }
       }
     }
-    return best;
+    return tried;
+  }
+
+  private double afterFault(List<Row> rows, double[] rest, Fault fault, double[] right) {
+    int at = 2 * fault.place();
+    double[] change = new double[2];
+    fault.polarise(right[at], right[at + 1], change, 0);
+    change[0] -= right[at];
+    change[1] -= right[at + 1];
+    double left = 0;
+    for (int i = 0; i < rest.length; i++) {
+      double[] flux = ring.fluxOf(rows.get(i));
+      double value = rest[i] - flux[at] * change[0] - flux[at + 1] * change[1];
+      left += value * value;
+    }
+    return left;
   }
 
   private Account withAlternatives(Account chosen) {

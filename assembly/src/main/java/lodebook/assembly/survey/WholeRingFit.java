@@ -11,6 +11,9 @@ import org.jspecify.annotations.Nullable;
 final class WholeRingFit {
   private static final double FREE_GAIN = 0.3;
   private static final double EXPLAINED_SHARE = 0.7;
+  private static final double LEAST_GAIN = -0.6;
+  private static final double MOST_GAIN = 1.5;
+  private static final double FARTHEST_METRES = 2.9e-3;
   private static final int ROUNDS = 6;
   private static final double LARGEST_STEP_METRES = 0.5e-3;
 
@@ -48,7 +51,12 @@ final class WholeRingFit {
     if (excess <= 0 || left > (1 - EXPLAINED_SHARE) * excess) {
       return null;
     }
-    return new WholeRing(gain(account.rows(), explanation), offset(explanation));
+    double gain = gain(account.rows(), explanation);
+    if (gain < LEAST_GAIN || gain > MOST_GAIN) {
+      return null;
+    }
+    double offset = offset(explanation);
+    return new WholeRing(gain, Math.abs(offset) < FARTHEST_METRES ? Double.valueOf(offset) : null);
   }
 
   private static double misfit(RowModel rows, Explanation explanation) {
@@ -72,7 +80,7 @@ final class WholeRingFit {
     return Judge.dot(mean, white) / Judge.dot(mean, mean);
   }
 
-  private @Nullable Double offset(Explanation explanation) {
+  private double offset(Explanation explanation) {
     double offset = 0;
     for (int round = 0; round < ROUNDS; round++) {
       RowModel moved = movedBy(offset);

@@ -115,7 +115,21 @@ final class Trials {
     boolean measured =
         said.measuring().equals(trial.measuring())
             || said.measuringAlternatives().contains(trial.measuring());
-    return said.verdict() == verdict && names.equals(trial.truth()) && measured;
+    return said.verdict() == verdict && measured && (names.equals(trial.truth()) || lookAlike(trial, said));
+  }
+
+  /// Whether the truth is among the slots that look-alike slips leave possible.
+  private static boolean lookAlike(Trial trial, Diagnosis said) {
+    return said.findings().size() == trial.faults().size()
+        && trial.faults().stream()
+            .allMatch(
+                fault ->
+                    said.findings().stream()
+                        .anyMatch(
+                            f ->
+                                f.kind() == fault.kind()
+                                    && (f.slot() == fault.place() + 1
+                                        || f.alsoPossibleSlots().contains(fault.place() + 1))));
   }
 
   static Set<String> words(List<Fault> faults) {
