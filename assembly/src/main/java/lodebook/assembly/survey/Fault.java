@@ -51,6 +51,16 @@ record Fault(int place, FaultKind kind, double amount) {
     }
   }
 
+  /// Change of the magnet's polarisation that the fault is, for a right ring's polarisation.
+  double[] change(double[] right) {
+    int at = 2 * place;
+    double[] into = new double[2];
+    polarise(right[at], right[at + 1], into, 0);
+    into[0] -= right[at];
+    into[1] -= right[at + 1];
+    return into;
+  }
+
   private static void set(double[] into, int at, double out, double next) {
     into[at] = out;
     into[at + 1] = next;

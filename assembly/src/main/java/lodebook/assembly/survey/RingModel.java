@@ -71,16 +71,9 @@ final class RingModel {
     return responses.at(place);
   }
 
-  /// Expected value of a row at 20 °C.
-  double expected(Row row, double[] polarisation) {
-    double[] flux =
-        responseAt(ReadingPlace.of(layout(), row.point(), row.radiusMetres(), row.heightMetres()))
-            .flux();
-    double sum = 0;
-    for (int i = 0; i < flux.length; i++) {
-      sum += flux[i] * polarisation[i];
-    }
-    return sum;
+  /// Whether every magnet that an explanation names is there.
+  boolean holds(Explanation explanation) {
+    return explanation.faults().stream().allMatch(f -> !f.ofMagnet() || filled(f.place()));
   }
 
   /// Response of a row to every magnet, two numbers per slot.

@@ -69,7 +69,7 @@ final class Screen {
     }
     double[][] change = new double[faults.size()][];
     for (int e = 0; e < change.length; e++) {
-      change[e] = change(faults.get(e), right);
+      change[e] = faults.get(e).change(right);
     }
     alone = new double[change.length];
     overlap = new double[change.length][change.length];
@@ -99,15 +99,6 @@ final class Screen {
       case TURNED -> Math.log(prior * TURN_STRETCH);
       default -> Math.log(prior);
     };
-  }
-
-  private static double[] change(Fault fault, double[] right) {
-    int at = 2 * fault.place();
-    double[] into = new double[2];
-    fault.polarise(right[at], right[at + 1], into, 0);
-    into[0] -= right[at];
-    into[1] -= right[at + 1];
-    return into;
   }
 
   /// The likeliest explanations, likeliest first; the ring being right is always among them.
@@ -206,7 +197,7 @@ final class Screen {
     double[] rest = residual.clone();
     double[] right = rows.ring().rightPolarisation();
     for (int e : scored.what()) {
-      double[] change = change(faults.get(e), right);
+      double[] change = faults.get(e).change(right);
       double[] shift = rows.answer(faults.get(e).place(), change[0], change[1]);
       for (int i = 0; i < rest.length; i++) {
         rest[i] -= shift[i];

@@ -55,13 +55,6 @@ record Slip(Measuring measuring, boolean tangentialTurned) {
     if (opposite() && reading.spot() == Spot.TO_NEXT) {
       slot = layout.previous(slot);
     }
-    double value = reading.fluxTesla() / unitFactor();
-    if (measuring.sign() == Measuring.Sign.INVERTED) {
-      value = -value;
-    }
-    if (tangentialTurned && reading.component() == Component.TANGENTIAL) {
-      value = -value;
-    }
     Double radius = reading.radiusMetres();
     Double height = reading.heightMetres();
     Double temperature = reading.temperatureCelsius();
@@ -69,10 +62,22 @@ record Slip(Measuring measuring, boolean tangentialTurned) {
         new ProbePoint(slot, reading.spot(), reading.component()),
         radius == null ? layout.probe().radiusMetres() : radius,
         height == null ? layout.probe().heightMetres() : height,
-        value,
+        freed(reading),
         temperature == null ? 0 : temperature - 20,
         temperature != null,
         reading.meter());
+  }
+
+  /// A value as written, freed of the slip, tesla.
+  double freed(Reading reading) {
+    return reading.fluxTesla() * freeing(reading);
+  }
+
+  /// Factor that frees a value as written from the slip.
+  double freeing(Reading reading) {
+    boolean turned = tangentialTurned && reading.component() == Component.TANGENTIAL;
+    boolean inverted = measuring.sign() == Measuring.Sign.INVERTED;
+    return (turned == inverted ? 1 : -1) / unitFactor();
   }
 
   List<Row> rows(List<Reading> readings, Layout layout) {

@@ -3,6 +3,7 @@ package lodebook.assembly.survey;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import lodebook.assembly.survey.SlipCandidates.Candidate;
 import org.jspecify.annotations.Nullable;
 
 /// Decides what the person measuring did.
@@ -17,36 +18,41 @@ final class Slips {
   private static final double WITH_A_FAULT = 2;
   private static final int STRAINED_FAULTS = 3;
   private static final double STRAINED_FIT = 1e-3;
+  private static final int WEIGHED = 12;
+  private static final int WEIGHED_ROWS = 800;
 
   private final RingModel ring;
   private final List<Reading> readings;
   private final Priors priors;
+  private final SlipCandidates candidates;
 
   Slips(RingModel ring, List<Reading> readings, Priors priors) {
     this.ring = ring;
     this.readings = readings;
     this.priors = priors;
+    this.candidates = new SlipCandidates(ring, readings);
   }
 
-  private record Tried(Slip slip, RowModel rows, Judged judged) {
-    double logWeight(Priors priors) {
-      return judged.logWeight() + slip.logPrior(priors, rows.ring().slots());
-    }
-  }
+  private record Tried(Slip slip, Judged judged, double logWeight) {}
 
   Account account() {
-    RowModel asSet = rows(Slip.NONE);
-    Account plain = new Account(Slip.NONE, asSet, Search.explain(asSet, priors), List.of());
-    List<Tried> tried = new ArrayList<>(tried(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE));
-    if (isStrained(plain)) {
-      tried.addAll(triedWithOneFault());
+    Account plain = searched(Slip.NONE);
+    boolean right = plain.best().explanation().faults().isEmpty();
+    if (plain.fits() && right) {
+      return withAlternatives(plain);
     }
-    Tried slipped = likeliest(tried);
-    boolean slipWins =
-        slipped != null
-            && (!plain.fits()
-                || slipped.logWeight(priors) > plain.best().logWeight() + AS_SET_WINS_BY);
-    return withAlternatives(slipWins && slipped != null ? searched(slipped.slip()) : plain);
+    List<Candidate> promising =
+        new ArrayList<>(candidates.like(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE));
+    if (isStrained(plain)) {
+      promising.addAll(candidates.withOneFault(WITH_A_FAULT, ROUGHLY_LIKE));
+    }
+    Tried slipped = likeliest(promising);
+    if (slipped != null
+        && (!plain.fits()
+            || slipped.logWeight() > plain.best().logWeight() + AS_SET_WINS_BY)) {
+      return withAlternatives(searched(slipped.slip()));
+    }
+    return withAlternatives(plain);
   }
 
   /// Whether an explanation needs so much that a slip with one fault might do better.
@@ -56,11 +62,41 @@ final class Slips {
         || account.best().fitProbability() < STRAINED_FIT;
   }
 
-  private @Nullable Tried likeliest(List<Tried> tried) {
-    return tried.stream()
-        .filter(t -> t.judged().fitProbability() >= Account.LEAST_FIT)
-        .max(Comparator.comparingDouble(t -> t.logWeight(priors)))
-        .orElse(null);
+  /// Weighs the candidates that leave least, then chooses among all that look like the best of
+  /// them.
+  private @Nullable Tried likeliest(List<Candidate> promising) {
+    Tried best =
+        promising.stream()
+            .filter(c -> !c.slip().equals(Slip.NONE))
+            .sorted(Comparator.comparingDouble(Candidate::leftOver))
+            .limit(WEIGHED + WEIGHED_ROWS / readings.size())
+            .map(this::tried)
+            .filter(t -> t.judged().fitProbability() >= Account.LEAST_FIT)
+            .max(Comparator.comparingDouble(Tried::logWeight))
+            .orElse(null);
+    if (best == null) {
+      return null;
+    }
+    Likeness likeness = new Likeness(best.slip(), best.judged());
+    Tried chosen = best;
+    for (Candidate candidate :
+        candidates.like(best.slip(), best.judged().explanation(), ROUGHLY_LIKE)) {
+      double logWeight = likeness.logWeight(candidate) + logPrior(candidate.slip());
+      if (!candidate.slip().equals(Slip.NONE) && logWeight > chosen.logWeight()) {
+        chosen = new Tried(candidate.slip(), best.judged(), logWeight);
+      }
+    }
+    return chosen;
+  }
+
+  private Tried tried(Candidate candidate) {
+    Judged judged = new Judge(rows(candidate.slip()), priors).judge(candidate.explanation());
+    return new Tried(
+        candidate.slip(), judged, judged.logWeight() + logPrior(candidate.slip()));
+  }
+
+  private double logPrior(Slip slip) {
+    return slip.logPrior(priors, ring.slots());
   }
 
   private Account searched(Slip slip) {
@@ -68,113 +104,47 @@ final class Slips {
     return new Account(slip, rows, Search.explain(rows, priors), List.of());
   }
 
-  /// Every slip with every single fault that leaves little of the readings' energy unexplained.
-  private List<Tried> triedWithOneFault() {
-    double[] right = ring.rightPolarisation();
-    List<Tried> tried = new ArrayList<>();
-    for (Slip slip : Slip.all(ring.slots())) {
-      if (slip.equals(Slip.NONE)) {
-        continue;
-      }
-      List<Row> rows = slip.rows(readings, ring.layout());
-      double[] rest = new double[rows.size()];
-      double energy = 0;
-      double left = 0;
-      for (int i = 0; i < rest.length; i++) {
-        double expected = ring.expected(rows.get(i), right);
-        rest[i] = rows.get(i).fluxTesla() - expected;
-        energy += expected * expected;
-        left += rest[i] * rest[i];
-      }
-      if (left > WITH_A_FAULT * energy) {
-        continue;
-      }
-      for (int slot = 0; slot < ring.slots(); slot++) {
-        for (Fault fault : Possible.of(ring, slot)) {
-          if (afterFault(rows, rest, fault, right) < ROUGHLY_LIKE * energy) {
-            RowModel model = new RowModel(ring, rows);
-            Explanation single = Explanation.NONE.with(fault);
-            tried.add(new Tried(slip, model, new Judge(model, priors).judge(single)));
-          }
-        }
-      }
-    }
-    return tried;
-  }
-
-  private double afterFault(List<Row> rows, double[] rest, Fault fault, double[] right) {
-    int at = 2 * fault.place();
-    double[] change = new double[2];
-    fault.polarise(right[at], right[at + 1], change, 0);
-    change[0] -= right[at];
-    change[1] -= right[at + 1];
-    double left = 0;
-    for (int i = 0; i < rest.length; i++) {
-      double[] flux = ring.fluxOf(rows.get(i));
-      double value = rest[i] - flux[at] * change[0] - flux[at + 1] * change[1];
-      left += value * value;
-    }
-    return left;
-  }
-
   private Account withAlternatives(Account chosen) {
     Explanation explanation = chosen.best().explanation();
-    List<Tried> equal = new ArrayList<>(tried(chosen.slip(), explanation, ROUGHLY_LIKE));
-    if (!explanation.faults().isEmpty()) {
-      equal.addAll(tried(chosen.slip(), Explanation.NONE, ROUGHLY_LIKE));
-    }
-    double bar = chosen.best().logWeight() - EQUAL;
+    Likeness likeness = new Likeness(chosen.slip(), chosen.best());
+    record Like(Slip slip, double logWeight) {}
     List<Slip> alternatives =
-        equal.stream()
-            .filter(t -> t.judged().fitProbability() >= Account.LEAST_FIT)
-            .filter(t -> t.judged().logWeight() >= bar)
-            .filter(t -> !t.slip().equals(chosen.slip()))
-            .sorted(Comparator.comparingDouble(t -> -t.logWeight(priors)))
-            .map(Tried::slip)
-            .distinct()
+        candidates.like(chosen.slip(), explanation, ROUGHLY_LIKE).stream()
+            .filter(c -> !c.slip().equals(chosen.slip()))
+            .filter(c -> likeness.logWeight(c) >= chosen.best().logWeight() - EQUAL)
+            .map(c -> new Like(c.slip(), likeness.logWeight(c) + logPrior(c.slip())))
+            .sorted(Comparator.comparingDouble(l -> -l.logWeight()))
+            .map(Like::slip)
             .toList();
     return new Account(chosen.slip(), chosen.rows(), chosen.weighed(), alternatives);
   }
 
-  /// Weighs the image of an explanation under every slip that leaves less than a share of the
-  /// readings' energy unexplained.
-  private List<Tried> tried(Slip from, Explanation explanation, double share) {
-    List<Tried> tried = new ArrayList<>();
-    double[] polarisation = new double[0];
-    for (Slip slip : Slip.all(ring.slots())) {
-      if (slip.equals(Slip.NONE) && from.equals(Slip.NONE)) {
-        continue;
-      }
-      Explanation image = from.image(explanation, slip, ring.slots());
-      if (!standsOnMagnets(image)) {
-        continue;
-      }
-      polarisation = ring.polarisation(image);
-      if (leftOver(slip, polarisation) < share) {
-        RowModel rows = rows(slip);
-        tried.add(new Tried(slip, rows, new Judge(rows, priors).judge(image)));
-      }
-    }
-    return tried;
-  }
-
-  private boolean standsOnMagnets(Explanation explanation) {
-    return explanation.faults().stream().allMatch(f -> !f.ofMagnet() || ring.filled(f.place()));
-  }
-
-  private double leftOver(Slip slip, double[] polarisation) {
-    double energy = 0;
-    double left = 0;
-    for (Reading reading : readings) {
-      Row row = slip.row(reading, ring.layout());
-      double expected = ring.expected(row, polarisation);
-      energy += Math.max(expected * expected, 0);
-      left += (row.fluxTesla() - expected) * (row.fluxTesla() - expected);
-    }
-    return energy > 0 ? left / energy : Double.POSITIVE_INFINITY;
-  }
-
   private RowModel rows(Slip slip) {
     return new RowModel(ring, slip.rows(readings, ring.layout()));
+  }
+
+  /// Weighs what looks like an explanation with that explanation's own covariance: whoever expects
+  /// nearly the same readings has nearly the same uncertainty.
+  private final class Likeness {
+    private final Slip slip;
+    private final Judged judged;
+    private final RowModel rows;
+    private final Cholesky factor;
+
+    Likeness(Slip slip, Judged judged) {
+      this.slip = slip;
+      this.judged = judged;
+      this.rows = rows(slip);
+      this.factor = new Cholesky(rows.covariance(judged.explanation()));
+    }
+
+    double logWeight(Candidate candidate) {
+      double[] residual = rows.read();
+      for (int i = 0; i < residual.length; i++) {
+        residual[i] -= candidate.written()[i] * slip.freeing(readings.get(i));
+      }
+      double[] white = factor.whiten(residual);
+      return judged.logWeight() + 0.5 * (judged.misfit() - Judge.dot(white, white));
+    }
   }
 }

@@ -115,7 +115,9 @@ final class Trials {
     boolean measured =
         said.measuring().equals(trial.measuring())
             || said.measuringAlternatives().contains(trial.measuring());
-    return said.verdict() == verdict && measured && (names.equals(trial.truth()) || lookAlike(trial, said));
+    return said.verdict() == verdict
+        && measured
+        && (names.equals(trial.truth()) || lookAlike(trial, said));
   }
 
   /// Whether the truth is among the slots that look-alike slips leave possible.
