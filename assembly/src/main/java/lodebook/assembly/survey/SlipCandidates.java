@@ -26,8 +26,8 @@ final class SlipCandidates {
     this.readings = readings;
   }
 
-  /// Images of an explanation that was found under one slip, under every other that leaves less than
-  /// a share of the readings' energy unexplained.
+  /// Images of an explanation that was found under one slip, under every other that leaves less
+  /// than a share of the readings' energy unexplained.
   List<Candidate> like(Slip from, Explanation explanation, double share) {
     List<Candidate> candidates = new ArrayList<>();
     Map<Course, double[]> means = new HashMap<>();
@@ -66,11 +66,9 @@ final class SlipCandidates {
           double[] changed = mean.clone();
           double[] change = fault.change(right);
           for (int i = 0; i < changed.length; i++) {
-            changed[i] +=
-                response[i][2 * slot] * change[0] + response[i][2 * slot + 1] * change[1];
+            changed[i] += response[i][2 * slot] * change[0] + response[i][2 * slot + 1] * change[1];
           }
-          Candidate candidate =
-              candidate(without.slip(), Explanation.NONE.with(fault), changed);
+          Candidate candidate = candidate(without.slip(), Explanation.NONE.with(fault), changed);
           if (candidate.leftOver() < after) {
             candidates.add(candidate);
           }

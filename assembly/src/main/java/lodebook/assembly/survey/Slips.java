@@ -48,8 +48,7 @@ final class Slips {
     }
     Tried slipped = likeliest(promising);
     if (slipped != null
-        && (!plain.fits()
-            || slipped.logWeight() > plain.best().logWeight() + AS_SET_WINS_BY)) {
+        && (!plain.fits() || slipped.logWeight() > plain.best().logWeight() + AS_SET_WINS_BY)) {
       return withAlternatives(searched(slipped.slip()));
     }
     return withAlternatives(plain);
@@ -91,8 +90,7 @@ final class Slips {
 
   private Tried tried(Candidate candidate) {
     Judged judged = new Judge(rows(candidate.slip()), priors).judge(candidate.explanation());
-    return new Tried(
-        candidate.slip(), judged, judged.logWeight() + logPrior(candidate.slip()));
+    return new Tried(candidate.slip(), judged, judged.logWeight() + logPrior(candidate.slip()));
   }
 
   private double logPrior(Slip slip) {
