@@ -4,10 +4,11 @@ import java.util.List;
 import lodebook.assembly.layout.Component;
 import lodebook.assembly.layout.FieldDerivatives;
 import lodebook.assembly.layout.FieldMatrix;
+import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.ReadingPlace;
 import lodebook.assembly.layout.RingField;
 
-/// How one reading answers to the polarisation of every magnet, and how that changes when probe or
+/// How one reading answers to the remanence of every magnet, and how that changes when probe or
 /// magnets move.
 ///
 /// Each quantity has two numbers per slot, index `2·slot + direction`, slot from 0, direction 0
@@ -22,19 +23,21 @@ final class ReadingResponse {
   private final double[] magnetNext;
 
   /// @param field the ring's field
+  /// @param mutual how the magnets answer to each other's field; left out only in the small change
+  ///   that a magnet's own displacement makes
   /// @param place where and along which direction
-  ReadingResponse(RingField field, ReadingPlace place) {
+  ReadingResponse(RingField field, MutualMagnetisation mutual, ReadingPlace place) {
     Component other =
         place.component() == Component.RADIAL ? Component.TANGENTIAL : Component.RADIAL;
     ReadingPlace sideways =
         new ReadingPlace(place.radiusMetres(), place.angleRadians(), place.heightMetres(), other);
-    FieldMatrix both = field.at(List.of(place, sideways));
+    FieldMatrix both = mutual.perRemanence(field.at(List.of(place, sideways)));
     FieldDerivatives slopes = field.derivatives(List.of(place));
     flux = line(both, 0);
     across = line(both, 1);
-    probeOut = line(slopes.probeOut(), 0);
-    probeNext = line(slopes.probeNext(), 0);
-    probeUp = line(slopes.probeUp(), 0);
+    probeOut = line(mutual.perRemanence(slopes.probeOut()), 0);
+    probeNext = line(mutual.perRemanence(slopes.probeNext()), 0);
+    probeUp = line(mutual.perRemanence(slopes.probeUp()), 0);
     magnetOut = line(slopes.magnetOut(), 0);
     magnetNext = line(slopes.magnetNext(), 0);
   }

@@ -8,12 +8,12 @@ import org.jspecify.annotations.Nullable;
 /// rule and the response of the field, kept per location.
 final class RingModel {
   private final SurveyedRing ring;
-  private final ProbeResponses responses;
+  private final ProbeResponses.Filled responses;
   private final double[] polarisation;
 
   RingModel(SurveyedRing ring, ProbeResponses responses) {
     this.ring = ring;
-    this.responses = responses;
+    this.responses = responses.withOnly(ring.magnets().keySet());
     this.polarisation = new double[2 * ring.layout().slots()];
     for (int slot = 1; slot <= slots(); slot++) {
       PlacedMagnet magnet = ring.at(slot);
