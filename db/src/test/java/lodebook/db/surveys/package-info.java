@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.surveys;
+
+import org.jspecify.annotations.NullMarked;
