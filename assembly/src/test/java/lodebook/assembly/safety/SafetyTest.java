@@ -83,6 +83,33 @@ final class SafetyTest {
     }
   }
 
+  /// Textbook closed form on the axis of a disc, diameter 10 and thickness 5 mm, at 40 mm from its
+  /// centre: B/Br = ½[(z+t)/√(R²+(z+t)²) − z/√(R²+z²)] with z = 37.5 mm from the face. Of a disc
+  /// this thin the axis is not always the farthest direction, so the distance is at least that.
+  @Test
+  void keepOutOfADiscReachesWhereTheClosedFormHasTheLimit() {
+    MagnetType disc = round(Shape.DISC, 0.005, 0, 0.010, 0, 0);
+    double z = 0.0375;
+    double perTesla = 0.5 * ((z + 0.005) / Math.hypot(0.005, z + 0.005) - z / Math.hypot(0.005, z));
+    double metres = KeepOut.metres(disc, 1.3, 1.3 * perTesla);
+    assertTrue(metres >= 0.04 - 1e-9 && metres < 0.0401, "40 mm or a little more, not " + metres);
+  }
+
+  /// Far away every body is the dipole of its volume: (Br·V/(2π·B))^(1/3).
+  @Test
+  void farAwayEveryShapeIsADipole() {
+    double arcVolume = Math.PI / 12 * (0.030 * 0.030 - 0.020 * 0.020) * 0.010;
+    double limit = 1e-6;
+    assertEquals(
+        Math.cbrt(1.3 * Math.PI * 0.0025 * 0.0025 * 0.010 / (2 * Math.PI * limit)),
+        KeepOut.metres(round(Shape.ROD, 0, 0.010, 0.005, 0, 0), 1.3, limit),
+        0.0005);
+    assertEquals(
+        Math.cbrt(1.3 * arcVolume / (2 * Math.PI * limit)),
+        KeepOut.metres(round(Shape.ARC, 0, 0.010, 0.060, 0.040, 30), 1.3, limit),
+        0.001);
+  }
+
   /// Twelve dipoles at one place: the moment is twelve times as large, the distance 12^(1/3).
   @Test
   void manyMagnetsTogether() {
