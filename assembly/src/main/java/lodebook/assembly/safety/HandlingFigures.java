@@ -22,11 +22,11 @@ public record HandlingFigures(
   /// @param magnets how many are handled together
   public static HandlingFigures of(MagnetType type, Grade grade, int magnets) {
     double remanence = grade.remanenceHighTesla();
-    double one = KeepOut.metres(type, remanence, FieldLimit.IMPLANTS.tesla());
+    double implants = FieldLimit.IMPLANTS.tesla();
     return new HandlingFigures(
         PinchForce.upperBoundNewton(type, remanence),
-        one,
-        KeepOut.metresTogether(one, magnets),
+        KeepOut.metres(type, remanence, implants),
+        KeepOut.metresTogether(type, remanence, implants, magnets),
         KeepOut.metres(type, remanence, FieldLimit.LOOSE_IRON.tesla()),
         grade.highestTemperatureCelsius());
   }

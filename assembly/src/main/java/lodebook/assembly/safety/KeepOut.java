@@ -42,15 +42,13 @@ public final class KeepOut {
     return far;
   }
 
-  /// Upper bound for many magnets close together: the distance at which they reach the limit if all
-  /// point the same way.
+  /// Upper bound for many magnets, however they stand: farther than this from each of them, n
+  /// fields that are each at most 1/n of the limit cannot add up to it.
   ///
-  /// Farther than this from every one of them, n fields that are each at most 1/n of the limit
-  /// cannot reach it; the field of one magnet falls at least with the cube of the distance there.
-  ///
-  /// @param oneMetres distance for one magnet
-  public static double metresTogether(double oneMetres, int magnets) {
-    return oneMetres * Math.cbrt(magnets);
+  /// @return metres from the centre of the nearest magnet
+  public static double metresTogether(
+      MagnetType type, double remanenceTesla, double limitTesla, int magnets) {
+    return metres(type, remanenceTesla, limitTesla / magnets);
   }
 
   private static Vector3 worstDirection(Body body, Vector3 polarisation, double metres) {

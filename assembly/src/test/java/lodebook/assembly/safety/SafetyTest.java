@@ -110,10 +110,16 @@ final class SafetyTest {
         0.001);
   }
 
-  /// Twelve dipoles at one place: the moment is twelve times as large, the distance 12^(1/3).
+  /// Twelve magnets at the bound's distance from a point, each turned so that its field there is as
+  /// strong as it can be and all fields point the same way, just reach the limit.
   @Test
-  void manyMagnetsTogether() {
-    assertEquals(0.04 * 2.28942848, KeepOut.metresTogether(0.04, 12), 1e-9);
+  void manyMagnetsTogetherReachTheLimitAtMost() {
+    double limit = FieldLimit.IMPLANTS.tesla();
+    double metres = KeepOut.metresTogether(CUBE, 1.3, limit, 12);
+    var point = new Vector3(metres, 0, 0);
+    double one = MagnetBody.of(CUBE).flux(point, new Vector3(1.3, 0, 0)).norm();
+    assertEquals(limit, 12 * one, 1e-3 * limit);
+    assertEquals(Math.cbrt(12), metres / KeepOut.metres(CUBE, 1.3, limit), 1e-3);
   }
 
   /// Block 4 × 4 × 10 mm of N42 at its highest remanence: a dipole of Br·V/µ0 has 0.5 mT at
@@ -124,7 +130,7 @@ final class SafetyTest {
     var figures = HandlingFigures.of(block(0.004, 0.004, 0.010), grade, 12);
     assertEquals(1.32 * 1.32 * 40e-6 / (8e-7 * Math.PI), figures.pinchNewton(), 1e-6);
     assertEquals(0.0407, figures.implantsMetres(), 0.0015);
-    assertEquals(figures.implantsMetres() * Math.cbrt(12), figures.implantsTogetherMetres(), 1e-9);
+    assertEquals(0.0407 * Math.cbrt(12), figures.implantsTogetherMetres(), 0.001);
     assertEquals(0.0224, figures.looseIronMetres(), 0.0015);
     assertEquals(80, figures.highestTemperatureCelsius());
   }

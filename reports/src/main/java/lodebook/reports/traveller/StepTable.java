@@ -35,11 +35,11 @@ final class StepTable {
     List<Table.Column> columns = new ArrayList<>();
     columns.add(new Table.Column(words.say("step.column.step"), 12.5));
     columns.add(new Table.Column(words.say("step.column.slot"), 13.5));
-    columns.add(new Table.Column(words.say("step.column.piece"), readings ? 36 : 56));
-    columns.add(new Table.Column(words.say("step.column.facing"), readings ? 37 : 60));
+    columns.add(new Table.Column(words.say("step.column.piece"), readings ? 35 : 56));
+    columns.add(new Table.Column(words.say("step.column.facing"), readings ? 36.5 : 60));
     if (readings) {
       columns.add(new Table.Column(words.say("step.column.component"), 22));
-      columns.add(new Table.Column(words.say("step.column.expected"), 28));
+      columns.add(new Table.Column(words.say("step.column.expected"), 30.5));
       columns.add(new Table.Column(words.say("step.column.read"), 20));
     }
     columns.add(new Table.Column(words.say("step.column.initials"), 16));

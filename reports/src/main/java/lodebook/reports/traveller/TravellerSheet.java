@@ -66,7 +66,7 @@ public final class TravellerSheet {
     Table steps = tables.steps(flow, traveller);
     flow.heading(
         words.say(traveller.inFillingOrder() ? "step.title.filling" : "step.title.slots"),
-        20 + steps.startHeight());
+        17 + steps.startHeight());
     flow.paragraph(words.say("step.explained"), Lettering.plain(11));
     flow.gap(1.5);
     steps.set();
