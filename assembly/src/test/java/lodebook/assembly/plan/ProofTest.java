@@ -73,7 +73,7 @@ class ProofTest {
       Candidate in = stock.get(slot);
       kept.add(new Kept(slot, in.piece(), "L", layout.ruleFacing(slot), in.strength()));
     }
-    List<Candidate> free = stock.subList(24, 60);
+    List<Candidate> free = stock.subList(24, 32);
     RotorPlan plan =
         Examples.planner(new RotorTask(layout, free, List.of(), kept, MixPolicy.FEW, null))
             .plan(1, new Effort(1000, () -> true, ratio -> {}));
