@@ -23,7 +23,7 @@ public final class RotorPlanner {
   private static final int ALWAYS_PROVEN = 8;
 
   private static final int MOST_PROVEN = 16;
-  private static final long NODES_TO_PROVE = 5_000_000;
+  private static final long NODES_TO_PROVE = 2_000_000;
 
   private final RotorTask task;
   private final HarmonicForm form;

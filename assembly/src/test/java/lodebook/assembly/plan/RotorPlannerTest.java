@@ -197,14 +197,14 @@ class RotorPlannerTest {
           placed);
     }
     double sum = 0;
-    for (int seed = 0; seed < 40; seed++) {
+    for (int seed = 0; seed < 12; seed++) {
       double asTheyCome =
           Examples.planner(RotorTask.of(TWELVE, Examples.lot("L", "MAIN", 12, 1.3, seed)))
               .plan(1, new Effort(1, () -> true, ratio -> {}))
               .asTheyCome();
       sum += asTheyCome * asTheyCome;
     }
-    assertEquals(Math.sqrt(sum / 40), plan.unwantedHarmonics(), 0.15 * plan.unwantedHarmonics());
+    assertEquals(Math.sqrt(sum / 12), plan.unwantedHarmonics(), 0.2 * plan.unwantedHarmonics());
   }
 
   @Test
