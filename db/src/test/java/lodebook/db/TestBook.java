@@ -11,9 +11,13 @@ import java.sql.SQLException;
 import java.sql.Statement;
 import java.time.Duration;
 import java.time.Instant;
+import java.util.EnumMap;
+import java.util.Map;
 import java.util.concurrent.atomic.AtomicLong;
+import java.util.function.Consumer;
 import lodebook.db.book.BookAddress;
 import lodebook.db.book.Visit;
+import lodebook.db.keep.NewBook;
 
 /// The two databases, for tests: new empty places, and connections that go round the book.
 public enum TestBook {
@@ -29,6 +33,20 @@ public enum TestBook {
     }
 
     @Override
+    BookAddress copy(BookAddress template) {
+      try {
+        BookAddress.Folder place = (BookAddress.Folder) newPlace();
+        Files.createDirectories(place.path());
+        Files.copy(
+            ((BookAddress.Folder) template).path().resolve("book.mv.db"),
+            place.path().resolve("book.mv.db"));
+        return place;
+      } catch (IOException failure) {
+        throw new UncheckedIOException(failure);
+      }
+    }
+
+    @Override
     public Connection raw(BookAddress address) throws SQLException {
       Path path = ((BookAddress.Folder) address).path();
       return DriverManager.getConnection("jdbc:h2:" + path.resolve("book"), "sa", "");
@@ -38,13 +56,20 @@ public enum TestBook {
   SERVER {
     @Override
     public BookAddress newPlace() {
+      return make("template0 encoding 'UTF8' locale_provider icu icu_locale 'de'");
+    }
+
+    @Override
+    BookAddress copy(BookAddress template) {
+      String url = ((BookAddress.Server) template).url();
+      return make(url.substring(url.lastIndexOf('/') + 1, url.indexOf('?')));
+    }
+
+    private BookAddress make(String template) {
       String name = "book" + Server.NUMBER.incrementAndGet();
       try (Connection connection = Server.RUNNING.getPostgresDatabase().getConnection();
           Statement statement = connection.createStatement()) {
-        statement.execute(
-            "create database "
-                + name
-                + " template template0 encoding 'UTF8' locale_provider icu icu_locale 'de'");
+        statement.execute("create database " + name + " template " + template);
       } catch (SQLException failure) {
         throw new IllegalStateException(failure);
       }
@@ -61,6 +86,19 @@ public enum TestBook {
 
   /// A place where a book can be made.
   public abstract BookAddress newPlace();
+
+  abstract BookAddress copy(BookAddress template);
+
+  /// A new book that nobody has signed yet.
+  public BookAddress newBook() {
+    return copy(Templates.EMPTY.get(this));
+  }
+
+  /// A new book of a shop: people LE (lead), IN (inspector), PL (planner) and BE (bench), meter
+  /// GM-1, type BLK-4-4-10 and lot L-1 of 60, accepted.
+  public BookAddress newShop() {
+    return copy(Templates.SHOP.get(this));
+  }
 
   /// A connection to a book's tables that knows nothing of its rules.
   public abstract Connection raw(BookAddress address) throws SQLException;
@@ -81,6 +119,22 @@ public enum TestBook {
         "a test",
         () -> start.plusSeconds(seconds.getAndIncrement()),
         Duration.ofSeconds(10));
+  }
+
+  private static final class Templates {
+    static final Map<TestBook, BookAddress> EMPTY = each(address -> {});
+    static final Map<TestBook, BookAddress> SHOP = each(TestShop::open);
+
+    private static Map<TestBook, BookAddress> each(Consumer<BookAddress> fill) {
+      Map<TestBook, BookAddress> templates = new EnumMap<>(TestBook.class);
+      for (TestBook database : values()) {
+        BookAddress place = database.newPlace();
+        NewBook.create(place, visit());
+        fill.accept(place);
+        templates.put(database, place);
+      }
+      return templates;
+    }
   }
 
   private static final class Server {

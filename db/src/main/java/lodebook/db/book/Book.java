@@ -171,7 +171,9 @@ public final class Book implements AutoCloseable {
       Instant now = visit.clock().instant().truncatedTo(ChronoUnit.MICROS);
       warnIfBehind(chain.getSequence(), now);
       Person person =
-          permission == Permission.CREATE_BOOK ? null : People.signing(sql, act.by(), permission);
+          permission == Permission.CREATE_BOOK
+              ? null
+              : Signature.signing(sql, act.by(), permission);
       Line.Head head =
           new Line.Head(
               chain.getSequence() + 1,

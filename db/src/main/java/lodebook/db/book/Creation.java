@@ -14,6 +14,7 @@ import java.util.stream.Stream;
 import lodebook.db.chain.LineText;
 import lodebook.db.refusal.Refusal;
 import lodebook.db.rights.Permission;
+import org.jooq.DSLContext;
 import org.jooq.impl.DSL;
 
 /// Makes a new book. An embedded one is made under another name and renamed at the end, so that a
@@ -44,16 +45,24 @@ final class Creation {
         refuseIfUsed(folder);
         Path made = folder.path().resolve("new.mv.db");
         Files.deleteIfExists(made);
-        EmbeddedEngine engine = EmbeddedEngine.named(folder, "new");
-        Generation.migrate(engine);
-        try (Book book = new Book(folder, visit, engine, null)) {
-          fill.accept(book);
+        try {
+          fillNew(folder, visit, fill);
+          Files.move(made, folder.file(), StandardCopyOption.ATOMIC_MOVE);
+        } finally {
+          Files.deleteIfExists(made);
         }
-        Files.move(made, folder.file(), StandardCopyOption.ATOMIC_MOVE);
       }
     } catch (IOException failure) {
       throw Refusal.cannotOpen("book.not-made", folder.shown(), failure.toString())
           .because(failure);
+    }
+  }
+
+  private static void fillNew(BookAddress.Folder folder, Visit visit, Consumer<Book> fill) {
+    EmbeddedEngine engine = EmbeddedEngine.named(folder, "new");
+    Generation.migrate(engine);
+    try (Book book = new Book(folder, visit, engine, null)) {
+      fill.accept(book);
     }
   }
 
@@ -72,19 +81,25 @@ final class Creation {
   private static void makeSchema(BookAddress.Server server, Visit visit, Consumer<Book> fill) {
     Engine engine = new ServerEngine(server, System.getenv("PGPASSWORD"));
     try (Book book = new Book(server, visit, engine, null)) {
-      int tables =
-          book.read(
-              sql ->
-                  sql.fetchCount(
-                      DSL.selectOne()
-                          .from("information_schema.tables")
-                          .where("table_schema = current_schema()")));
-      if (tables > 0) {
+      if (!book.read(Creation::tables).isEmpty()) {
         throw Refusal.refused("book.schema-not-empty", server.url());
       }
-      Generation.migrate(engine);
-      fill.accept(book);
+      try {
+        Generation.migrate(engine);
+        fill.accept(book);
+      } catch (RuntimeException failure) {
+        book.unchained(
+            sql -> tables(sql).forEach(table -> sql.dropTable(DSL.name(table)).cascade().execute()));
+        throw failure;
+      }
     }
+  }
+
+  private static List<String> tables(DSLContext sql) {
+    return sql.select(DSL.field("table_name", String.class))
+        .from("information_schema.tables")
+        .where("table_schema = current_schema()")
+        .fetch(r -> r.value1());
   }
 
   private static void begin(Book book, Consumer<Writing> first) {

@@ -25,17 +25,17 @@ public class Refusal extends RuntimeException {
   }
 
   /// What was handed in is wrong in itself (exit code 3).
-  public static Refusal wrongInput(String key, Object... arguments) {
+  public static Refusal wrongInput(String key, @Nullable Object... arguments) {
     return new Refusal(RefusalKind.WRONG_INPUT, Notice.of(key, arguments), null);
   }
 
   /// What the book holds does not allow it (exit code 4).
-  public static Refusal refused(String key, Object... arguments) {
+  public static Refusal refused(String key, @Nullable Object... arguments) {
     return new Refusal(RefusalKind.REFUSED, Notice.of(key, arguments), null);
   }
 
   /// The book cannot be opened (exit code 5).
-  public static Refusal cannotOpen(String key, Object... arguments) {
+  public static Refusal cannotOpen(String key, @Nullable Object... arguments) {
     return new Refusal(RefusalKind.CANNOT_OPEN, Notice.of(key, arguments), null);
   }
 

@@ -11,8 +11,8 @@ import org.jooq.DSLContext;
 import org.jspecify.annotations.Nullable;
 
 /// Finds who signs a transaction.
-final class People {
-  private People() {}
+final class Signature {
+  private Signature() {}
 
   /// The person who signs, or null where nobody needs to: the first person of a book.
   static @Nullable Person signing(DSLContext sql, @Nullable String by, Permission permission) {
