@@ -161,7 +161,7 @@ final class ReadingWriter {
             row.standoffMetres(),
             row.temperatureCelsius(),
             meter == null ? null : stock.meterIds().get(CodeText.fold(meter)),
-            by == null ? writing.person().id() : stock.people().get(CodeText.fold(by)),
+            personOf(by),
             fingerprint,
             repeat,
             false,
@@ -189,6 +189,12 @@ final class ReadingWriter {
             PIECE_READING.RECORDED_AT,
             PIECE_READING.HISTORY_SEQUENCE),
         written);
+  }
+
+  private long personOf(@Nullable String by) {
+    return by == null
+        ? writing.person().id()
+        : Objects.requireNonNull(stock.people().get(CodeText.fold(by)), "people were checked");
   }
 
   /// Earlier readings of the lot's pieces that count, by piece.

@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.chain;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.keep;
+
+import org.jspecify.annotations.NullMarked;

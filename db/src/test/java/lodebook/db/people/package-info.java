@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.people;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.stock;
+
+import org.jspecify.annotations.NullMarked;
