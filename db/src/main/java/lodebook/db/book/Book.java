@@ -54,6 +54,27 @@ public final class Book implements AutoCloseable {
     Creation.create(address, visit, first);
   }
 
+  /// Makes a new book from rows that stand elsewhere; only where nothing is.
+  ///
+  /// @param load fills all tables, in one transaction
+  /// @param after what is done in the filled book; if it is refused, there is no book
+  public static void fill(BookAddress address, Visit visit, Load load, Consumer<Book> after) {
+    Creation.make(
+        address,
+        visit,
+        book -> {
+          book.unchained(sql -> sql.connection(load::into));
+          after.accept(book);
+        });
+  }
+
+  /// Fills the tables of a new book.
+  @FunctionalInterface
+  public interface Load {
+    /// Inserts all rows.
+    void into(Connection connection) throws SQLException;
+  }
+
   /// Where this book is.
   public BookAddress address() {
     return address;

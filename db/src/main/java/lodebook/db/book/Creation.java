@@ -89,7 +89,8 @@ final class Creation {
         fill.accept(book);
       } catch (RuntimeException failure) {
         book.unchained(
-            sql -> tables(sql).forEach(table -> sql.dropTable(DSL.name(table)).cascade().execute()));
+            sql ->
+                tables(sql).forEach(table -> sql.dropTable(DSL.name(table)).cascade().execute()));
         throw failure;
       }
     }

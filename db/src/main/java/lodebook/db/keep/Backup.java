@@ -29,8 +29,8 @@ import lodebook.db.refusal.Refusal;
 import org.jooq.DSLContext;
 import org.jooq.exception.DataAccessException;
 
-/// Writing a whole book into one file: a zip with a CSV for each table and a manifest. It is the same
-/// for both databases, and so the way from one to the other.
+/// Writing a whole book into one file: a zip with a CSV for each table and a manifest. It is the
+/// same for both databases, and so the way from one to the other.
 public final class Backup {
   private final Book book;
 
@@ -54,8 +54,7 @@ public final class Backup {
       Files.move(part, file, StandardCopyOption.ATOMIC_MOVE);
       return head;
     } catch (IOException | UncheckedIOException failure) {
-      throw Refusal.cannotOpen("backup.not-written", file, failure.getMessage())
-          .because(failure);
+      throw Refusal.cannotOpen("backup.not-written", file, failure.getMessage()).because(failure);
     }
   }
 
@@ -70,8 +69,7 @@ public final class Backup {
       }
       book.read(sql -> sql.connectionResult(c -> csvs(c, folder)));
     } catch (IOException | UncheckedIOException failure) {
-      throw Refusal.cannotOpen("backup.not-written", folder, failure.getMessage())
-          .because(failure);
+      throw Refusal.cannotOpen("backup.not-written", folder, failure.getMessage()).because(failure);
     }
   }
 

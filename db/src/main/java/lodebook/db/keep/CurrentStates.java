@@ -74,8 +74,7 @@ final class CurrentStates {
         .forEach(
             p ->
                 states.put(
-                    "person " + p.getInitials(),
-                    p.getRole() + (p.getRetired() ? " retired" : "")));
+                    "person " + p.getInitials(), p.getRole() + (p.getRetired() ? " retired" : "")));
   }
 
   private void lots() {
@@ -92,20 +91,13 @@ final class CurrentStates {
         .join(CODE)
         .on(CODE.ID.eq(PIECE.LOT_ID))
         .where(PIECE.STATE.ne("usable"))
-        .forEach(
-            r ->
-                states.put("piece " + new PieceName(r.value1(), r.value2()), r.value3()));
+        .forEach(r -> states.put("piece " + new PieceName(r.value1(), r.value2()), r.value3()));
   }
 
   private void slots() {
     Code rotor = CODE.as("rotor_code");
     Code lot = CODE.as("lot_code");
-    sql.select(
-            rotor.SHOWN,
-            LIVE_SLOT.SLOT,
-            lot.SHOWN,
-            PIECE.NUMBER,
-            PLACEMENT.FACING_DEGREES)
+    sql.select(rotor.SHOWN, LIVE_SLOT.SLOT, lot.SHOWN, PIECE.NUMBER, PLACEMENT.FACING_DEGREES)
         .from(LIVE_SLOT)
         .join(PLACEMENT)
         .on(PLACEMENT.ID.eq(LIVE_SLOT.PLACEMENT_ID))

@@ -17,8 +17,8 @@ import org.jooq.Table;
 import org.jooq.TableField;
 import org.jooq.impl.DSL;
 
-/// Looks whether every foreign key points to something, in case the tables were changed from outside
-/// with the rules switched off.
+/// Looks whether every foreign key points to something, in case the tables were changed from
+/// outside with the rules switched off.
 final class ForeignKeys {
   private ForeignKeys() {}
 
@@ -49,7 +49,8 @@ final class ForeignKeys {
   }
 
   @SuppressWarnings("unchecked")
-  private static Condition equal(@org.jspecify.annotations.Nullable Field<?> parent, Field<?> child) {
+  private static Condition equal(
+      @org.jspecify.annotations.Nullable Field<?> parent, Field<?> child) {
     if (parent == null) {
       throw new IllegalStateException("a foreign key without its parent column");
     }

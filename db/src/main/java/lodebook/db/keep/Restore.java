@@ -52,8 +52,7 @@ public final class Restore {
     } catch (ZipException broken) {
       throw Refusal.wrongInput("backup.broken", file, broken.getMessage()).because(broken);
     } catch (IOException failure) {
-      throw Refusal.cannotOpen("backup.unreadable", file, failure.getMessage())
-          .because(failure);
+      throw Refusal.cannotOpen("backup.unreadable", file, failure.getMessage()).because(failure);
     }
   }
 

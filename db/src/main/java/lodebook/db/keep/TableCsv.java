@@ -22,17 +22,17 @@ import lodebook.db.keep.TableShape.Column;
 import org.jspecify.annotations.Nullable;
 
 /// A table as CSV (RFC 4180): a header, rows by their primary key, times in UTC, numbers as Java
-/// prints them so that they come back the same. An empty field is null where the column may be, else
-/// an empty text.
+/// prints them so that they come back the same. An empty field is null where the column may be,
+/// else an empty text.
 final class TableCsv {
   private static final int AT_ONCE = 1000;
 
   private TableCsv() {}
 
   /// Writes all rows and returns how many.
-  static long write(Connection connection, TableShape table, Writer out) throws SQLException {
-    String columns =
-        table.columns().stream().map(Column::name).collect(Collectors.joining(", "));
+  static long write(Connection connection, TableShape table, Writer out)
+      throws SQLException, IOException {
+    String columns = table.columns().stream().map(Column::name).collect(Collectors.joining(", "));
     CsvWriter csv = CsvWriter.builder().build(out);
     csv.writeRecord(table.columns().stream().map(Column::name).toList());
     long rows = 0;
@@ -48,6 +48,7 @@ final class TableCsv {
         }
       }
     }
+    csv.flush();
     return rows;
   }
 
@@ -74,30 +75,27 @@ final class TableCsv {
     return cell instanceof OffsetDateTime time ? time.toInstant().toString() : cell.toString();
   }
 
-  /// Inserts all rows and returns how many.
-  static long read(Connection connection, TableShape table, Reader in)
-      throws SQLException, IOException {
-    try (CsvReader<CsvRecord> csv = CsvReader.builder().ofCsvRecord(in)) {
-      Iterator<CsvRecord> records = csv.iterator();
-      List<String> header = records.next().getFields();
-      List<Column> columns = header.stream().map(name -> column(table, name)).toList();
-      String places = columns.stream().map(c -> "?").collect(Collectors.joining(", "));
-      long rows = 0;
-      try (PreparedStatement insert =
-          connection.prepareStatement(
-              "insert into %s (%s) values (%s)"
-                  .formatted(table.name(), String.join(", ", header), places))) {
-        while (records.hasNext()) {
-          bind(insert, columns, records.next().getFields());
-          insert.addBatch();
-          if (++rows % AT_ONCE == 0) {
-            insert.executeBatch();
-          }
+  /// Inserts all rows and returns how many; reads to the end and leaves the reader open.
+  static long read(Connection connection, TableShape table, Reader in) throws SQLException {
+    Iterator<CsvRecord> records = CsvReader.builder().ofCsvRecord(in).iterator();
+    List<String> header = records.next().getFields();
+    List<Column> columns = header.stream().map(name -> column(table, name)).toList();
+    String places = columns.stream().map(c -> "?").collect(Collectors.joining(", "));
+    long rows = 0;
+    try (PreparedStatement insert =
+        connection.prepareStatement(
+            "insert into %s (%s) values (%s)"
+                .formatted(table.name(), String.join(", ", header), places))) {
+      while (records.hasNext()) {
+        bind(insert, columns, records.next().getFields());
+        insert.addBatch();
+        if (++rows % AT_ONCE == 0) {
+          insert.executeBatch();
         }
-        insert.executeBatch();
       }
-      return rows;
+      insert.executeBatch();
     }
+    return rows;
   }
 
   private static Column column(TableShape table, String name) {

@@ -120,8 +120,7 @@ record TableShape(String name, List<Column> columns, List<String> key, Set<Strin
     try (ResultSet rows =
         meta.getPrimaryKeys(connection.getCatalog(), connection.getSchema(), table)) {
       while (rows.next()) {
-        key.put(
-            rows.getInt("KEY_SEQ"), rows.getString("COLUMN_NAME").toLowerCase(Locale.ROOT));
+        key.put(rows.getInt("KEY_SEQ"), rows.getString("COLUMN_NAME").toLowerCase(Locale.ROOT));
       }
     }
     return List.copyOf(key.values());

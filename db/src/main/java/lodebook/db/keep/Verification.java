@@ -135,9 +135,7 @@ public final class Verification {
     sql.selectFrom(HISTORY_SUBJECT)
         .forEach(
             r ->
-                subjects
-                    .computeIfAbsent(r.getSequence(), s -> new TreeSet<>())
-                    .add(r.getFolded()));
+                subjects.computeIfAbsent(r.getSequence(), s -> new TreeSet<>()).add(r.getFolded()));
     return subjects;
   }
 }
