@@ -1,10 +1,10 @@
 package lodebook.db.keep;
 
+import lodebook.assembly.magnet.GradeTable;
 import lodebook.db.book.Book;
 import lodebook.db.book.BookAddress;
 import lodebook.db.book.Visit;
 import lodebook.db.stock.Grades;
-import lodebook.db.stock.UsualGrades;
 
 /// Making a new book.
 public final class NewBook {
@@ -12,6 +12,6 @@ public final class NewBook {
 
   /// Makes a new book that knows the usual grades, only where nothing is.
   public static void create(BookAddress address, Visit visit) {
-    Book.create(address, visit, writing -> Grades.insert(writing, UsualGrades.all()));
+    Book.create(address, visit, writing -> Grades.insert(writing, GradeTable.all()));
   }
 }

@@ -8,6 +8,7 @@ import static lodebook.db.tables.Tables.HISTORY_SUBJECT;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import lodebook.db.book.Book;
@@ -60,7 +61,7 @@ public final class Verification {
   /// Walks the chain to the first line that does not fit.
   private void chain(ChainHeadRecord head) {
     Map<Long, StringBuilder> more = continued();
-    Map<Long, TreeSet<String>> subjects = subjects();
+    Map<Long, Set<String>> subjects = subjects();
     String hash = LineText.START;
     long line = 0;
     boolean expectedSeen = expected == null;
@@ -70,7 +71,7 @@ public final class Verification {
         line++;
         StringBuilder rest = more.remove(row.getSequence());
         String text = row.getContent() + (rest == null ? "" : rest);
-        TreeSet<String> said = subjects.remove(row.getSequence());
+        Set<String> said = subjects.remove(row.getSequence());
         if (!fits(row, text, hash, line, said == null ? new TreeSet<>() : said)) {
           faults.add(Notice.of("verify.line", line));
           return;
@@ -89,7 +90,7 @@ public final class Verification {
   }
 
   private boolean fits(
-      HistoryRecord row, String text, String before, long line, TreeSet<String> subjects) {
+      HistoryRecord row, String text, String before, long line, Set<String> subjects) {
     if (row.getSequence() != line || !LineText.hash(before, text).equals(row.getHash())) {
       return false;
     }
@@ -130,8 +131,8 @@ public final class Verification {
     return more;
   }
 
-  private Map<Long, TreeSet<String>> subjects() {
-    Map<Long, TreeSet<String>> subjects = new TreeMap<>();
+  private Map<Long, Set<String>> subjects() {
+    Map<Long, Set<String>> subjects = new TreeMap<>();
     sql.selectFrom(HISTORY_SUBJECT)
         .forEach(
             r ->

@@ -22,6 +22,11 @@ public final class PieceImport {
   private final Book book;
   private final StrengthEstimator estimator;
 
+  /// Taking readings into a book; strengths by the craft's gauge.
+  public PieceImport(Book book) {
+    this(book, new GaugeEstimator());
+  }
+
   /// Taking readings into a book.
   ///
   /// @param estimator turns a piece's readings into its strength

@@ -70,7 +70,7 @@ final class ReadingCheck {
     if (row.number() < 1) {
       problem(index, "piece", Refusal.wrongInput("piece.number", row.number()));
     }
-    if (!(row.fluxTesla() >= 0)) {
+    if (!(row.fluxTesla() > 0)) {
       problem(index, "value", Refusal.wrongInput("reading.negative", name(row)));
     }
     if (!(row.standoffMetres() >= 0)) {

@@ -8,7 +8,7 @@ import org.jspecify.annotations.Nullable;
 /// @param number the piece's number in the lot
 /// @param tray its tray, or null
 /// @param cell its cell in the tray, or null
-/// @param fluxTesla flux density over the north face, tesla, not negative
+/// @param fluxTesla flux density over the north face, tesla, above 0
 /// @param standoffMetres face to sensing element, metres
 /// @param temperatureCelsius temperature of the piece, or null where not taken
 /// @param meter the instrument, or null

@@ -2,8 +2,11 @@ package lodebook.db.stock;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.Objects;
+import lodebook.assembly.magnet.MagnetType;
 import lodebook.assembly.magnet.Strength;
 import lodebook.db.TestBook;
 import lodebook.db.TestShop;
@@ -125,7 +128,7 @@ class PieceImportTest {
           "2 cell: piece L-1/0001 lies in T-1 A1, not in T-1 B1",
           "2 meter: there is no meter GM-9",
           "2 by: nobody here signs as ZZ",
-          "3 value: piece L-1/0004: a reading over the north face is not negative: south face, or"
+          "3 value: piece L-1/0004: a reading over the north face is above 0: south face, or"
               + " the sign inverted?",
           "3 tray: GM-1 is taken already: it is a meter",
           "4 standoff_mm: piece L-1/0005: the standoff is not negative",
@@ -205,6 +208,59 @@ class PieceImportTest {
               "0 cell: cell T-1 A3 holds piece L-1/0003", "1 piece: there is no piece L-1/0009"),
           refused.problems().stream().map(LotTest::text).toList());
     }
+  }
+
+  /// The block's field on its axis: checked against the closed form, B/Br at 1 mm.
+  @ParameterizedTest
+  @EnumSource
+  void aStrengthIsTheReadingOverTheFieldOfAMagnetOfOneTesla(TestBook database) {
+    try (Book book = Book.open(database.newShop(), TestBook.visit())) {
+      double perRemanence = onAxis(1e-3, 4e-3, 10e-3, 4e-3);
+      MagnetType block = TestShop.BLOCK;
+      new MagnetTypes(book)
+          .importTypes(
+              TestShop.LEAD,
+              List.of(
+                  new MagnetType(
+                      "HARD",
+                      block.shape(),
+                      block.thicknessMetres(),
+                      block.widthMetres(),
+                      block.lengthMetres(),
+                      0,
+                      0,
+                      0,
+                      "N42",
+                      0.05e-3,
+                      "",
+                      1,
+                      0)));
+      NewLot lot = TestShop.lot("L-2", 5);
+      new LotImport(book)
+          .importLots(
+              TestShop.LEAD,
+              List.of(new NewLot("L-2", "HARD", "S", "", lot.received(), 5, "", null, "")));
+      new PieceImport(book)
+          .importReadings(
+              TestShop.BENCH,
+              "L-2",
+              List.of(
+                  new ReadingRow(
+                      1, null, null, 1.3 * perRemanence, 1e-3, 20.0, "GM-1", null, null)),
+              null);
+      Strength strength = new Pieces(book).show(PieceName.of("L-2/1")).strength();
+      assertEquals(1.3, Objects.requireNonNull(strength).remanenceTesla(), 1e-9);
+      assertTrue(strength.standardUncertaintyTesla() > 0.013);
+    }
+  }
+
+  private static double onAxis(double z, double width, double length, double thickness) {
+    return (pole(z, width, length) - pole(z + thickness, width, length)) / Math.PI;
+  }
+
+  private static double pole(double z, double width, double length) {
+    return Math.atan(
+        width * length / (2 * z * Math.sqrt(4 * z * z + width * width + length * length)));
   }
 
   private static void assertProblems(
