@@ -13,6 +13,7 @@ import java.time.Duration;
 import java.time.Instant;
 import java.util.EnumMap;
 import java.util.Map;
+import java.util.Objects;
 import java.util.concurrent.atomic.AtomicLong;
 import java.util.function.Consumer;
 import lodebook.db.book.BookAddress;
@@ -91,13 +92,13 @@ public enum TestBook {
 
   /// A new book that nobody has signed yet.
   public BookAddress newBook() {
-    return copy(Templates.EMPTY.get(this));
+    return copy(Objects.requireNonNull(Templates.EMPTY.get(this)));
   }
 
   /// A new book of a shop: people LE (lead), IN (inspector), PL (planner) and BE (bench), meter
   /// GM-1, type BLK-4-4-10 and lot L-1 of 60, accepted.
   public BookAddress newShop() {
-    return copy(Templates.SHOP.get(this));
+    return copy(Objects.requireNonNull(Templates.SHOP.get(this)));
   }
 
   /// A connection to a book's tables that knows nothing of its rules.

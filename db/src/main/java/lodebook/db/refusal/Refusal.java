@@ -56,6 +56,12 @@ public class Refusal extends RuntimeException {
     return explained;
   }
 
+  /// The English sentence, without the remedy.
+  @Override
+  public String getMessage() {
+    return String.valueOf(super.getMessage());
+  }
+
   /// What kind of refusal it is.
   public RefusalKind kind() {
     return kind;

@@ -212,7 +212,7 @@ class ConstraintTest {
             rule.refused());
     Matcher name =
         Pattern.compile("\\b(pk|uq|fk|ck)_[a-z_]+")
-            .matcher(failure.getMessage().toLowerCase(java.util.Locale.ROOT));
+            .matcher(String.valueOf(failure.getMessage()).toLowerCase(java.util.Locale.ROOT));
     assertEquals(rule.constraint(), name.find() ? name.group() : failure.getMessage());
     try (Book book = Book.open(place, TestBook.visit())) {
       RuntimeException explained =
