@@ -54,36 +54,12 @@ final class Trials {
         right++;
       } else if (said.verdict() == Verdict.CANNOT_TELL) {
         unsure++;
-        unsureOnes.add(
-            "seed "
-                + (seed + i)
-                + ": "
-                + trial.truth()
-                + " but "
-                + brief(said)
-                + " truth "
-                + weight(trial));
+        unsureOnes.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       } else {
-        wrong.add(
-            "seed "
-                + (seed + i)
-                + ": "
-                + trial.truth()
-                + " but "
-                + brief(said)
-                + " truth "
-                + weight(trial));
+        wrong.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       }
     }
     return new Count(right, unsure, wrong, unsureOnes);
-  }
-
-  /// Weight and fit of the true explanation.
-  private static Judged weight(Trial trial) {
-    RingModel ring = new RingModel(trial.ring(), new ProbeResponses(trial.ring().design()));
-    RowModel rows = new RowModel(ring, Slip.NONE.rows(trial.readings(), trial.ring().layout()));
-    System.out.print("best " + Search.explain(rows, Priors.DEFAULT).getFirst() + " ");
-    return new Judge(rows, Priors.DEFAULT).judge(new Explanation(trial.faults()));
   }
 
   static String brief(Diagnosis said) {
