@@ -106,7 +106,7 @@ final class Conclusion {
     for (Fault fault : explanation.faults()) {
       if (fault.ofMagnet()) {
         family.put(
-            fault.place(), fault.kind() == FaultKind.WEAK ? FaultKind.MISSING : fault.kind());
+            fault.place(), fault.kind() == FaultKind.WEAK ? FaultKind.MISSING : fault.name());
       }
     }
     return family;
@@ -122,14 +122,8 @@ final class Conclusion {
   private static List<NamedFault> names(Explanation explanation) {
     return explanation.faults().stream()
         .filter(Fault::ofMagnet)
-        .map(f -> new NamedFault(f.place() + 1, nameOf(f)))
+        .map(f -> new NamedFault(f.place() + 1, f.name()))
         .toList();
-  }
-
-  private static FaultKind nameOf(Fault fault) {
-    return fault.kind() == FaultKind.WEAK && fault.amount() < Fault.MISSING_BELOW
-        ? FaultKind.MISSING
-        : fault.kind();
   }
 
   private List<Measuring> measuringAlternatives() {
@@ -168,7 +162,7 @@ final class Conclusion {
 
   private Finding finding(Fault fault, int slot, List<Evidence> evidence) {
     Facing should = ring.layout().ruleFacing(slot);
-    FaultKind kind = nameOf(fault);
+    FaultKind kind = fault.name();
     @Nullable Facing faces =
         switch (kind) {
           case REVERSED -> should.reversed();
@@ -201,7 +195,7 @@ final class Conclusion {
       all += weight;
       boolean names =
           judged.explanation().faults().stream()
-              .anyMatch(f -> f.place() == fault.place() && nameOf(f) == nameOf(fault));
+              .anyMatch(f -> f.place() == fault.place() && f.name() == fault.name());
       if (names) {
         with += weight;
       }

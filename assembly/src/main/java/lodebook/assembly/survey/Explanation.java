@@ -24,6 +24,12 @@ record Explanation(List<Fault> faults) {
     return new Explanation(more);
   }
 
+  Explanation withAll(List<Fault> others) {
+    List<Fault> more = new ArrayList<>(faults);
+    more.addAll(others);
+    return new Explanation(more);
+  }
+
   /// Slot indices of the magnets that it names.
   BitSet magnets() {
     BitSet set = new BitSet();

@@ -11,6 +11,8 @@ record Fault(int place, FaultKind kind, double amount) {
   static final double STRONG_ABOVE = 1.1;
   static final double STRONGEST = 1.5;
   static final double MISSING_BELOW = 0.2;
+  static final double LEAST_TURN = Math.toRadians(15);
+  private static final double NEARLY_DEGREES = 15;
 
   static Fault of(int place, FaultKind kind) {
     return new Fault(place, kind, 0);
@@ -18,6 +20,24 @@ record Fault(int place, FaultKind kind, double amount) {
 
   static Fault suspect(int row) {
     return new Fault(row, FaultKind.SUSPECT_READING, 0);
+  }
+
+  /// What people are told: a magnet with hardly any strength is missing, one turned by nearly a
+  /// quarter or a half is called so.
+  FaultKind name() {
+    if (kind == FaultKind.WEAK && amount < MISSING_BELOW) {
+      return FaultKind.MISSING;
+    }
+    if (kind == FaultKind.TURNED) {
+      double degrees = Math.toDegrees(amount);
+      if (Math.abs(degrees) > 180 - NEARLY_DEGREES) {
+        return FaultKind.REVERSED;
+      }
+      if (Math.abs(Math.abs(degrees) - 90) < NEARLY_DEGREES) {
+        return degrees > 0 ? FaultKind.QUARTER_TURN_FORWARD : FaultKind.QUARTER_TURN_BACK;
+      }
+    }
+    return kind;
   }
 
   boolean ofMagnet() {

@@ -125,10 +125,17 @@ final class Judge {
         best[k] = fault.amount() + step[k];
         sum +=
             fault.kind() == FaultKind.TURNED
-                ? -Math.log(fault.highest() - fault.lowest())
+                ? turnEvidence(fault, best[k])
                 : logShareEvidence(fault, best[k], Math.sqrt(variances[k]));
       }
       logEvidence = sum;
+    }
+
+    /// An even prior on all turns; what is less than the least turn is none.
+    private static double turnEvidence(Fault fault, double turn) {
+      return Math.abs(turn) < Fault.LEAST_TURN
+          ? Double.NEGATIVE_INFINITY
+          : -Math.log(fault.highest() - fault.lowest());
     }
 
     /// Weight of the prior on the range of shares, under the likelihood's bell curve; the prior's

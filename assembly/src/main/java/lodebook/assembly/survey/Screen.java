@@ -112,15 +112,16 @@ final class Screen {
     }
     ranked.sort(Comparator.comparingDouble((Best.Scored<int[]> s) -> -s.score()));
     List<Best.Scored<Explanation>> found = new ArrayList<>();
+    int rank = 0;
+    int singles = 0;
     for (Best.Scored<int[]> scored : ranked) {
       Explanation explanation =
           new Explanation(Arrays.stream(scored.what()).mapToObj(faults::get).toList());
       found.add(new Best.Scored<>(scored.score(), explanation));
-      if (found.size() <= SUSPECTS_FROM) {
-        withSuspects(scored, explanation).forEach(found::add);
-      }
-      if (found.size() > 4 * count) {
-        break;
+      boolean small =
+          scored.what().length == 0 || scored.what().length == 1 && singles++ < SUSPECTS_FROM;
+      if (small || rank++ < SUSPECTS_FROM) {
+        found.addAll(withSuspects(scored, explanation));
       }
     }
     found.sort(Comparator.comparingDouble((Best.Scored<Explanation> s) -> -s.score()));

@@ -24,8 +24,7 @@ final class Search {
     Map<List<NamedFault>, Judged> weighed = new HashMap<>();
     Judged best = weigh(judge, screening(rows), rows, priors, FIRST, weighed);
     for (int round = 1; round < ROUNDS; round++) {
-      Cholesky own = new Cholesky(rows.covariance(best.explanation().ofMagnets()));
-      Judged next = weigh(judge, own, rows, priors, LATER, weighed);
+      Judged next = weighRound(judge, best.explanation(), rows, priors, weighed);
       if (next.explanation().key().equals(best.explanation().key())) {
         break;
       }
@@ -65,6 +64,26 @@ final class Search {
       Map<List<NamedFault>, Judged> weighed) {
     for (Explanation explanation : new Screen(rows, factor, priors).likeliest(count)) {
       weighed.computeIfAbsent(explanation.key(), key -> judge.judge(explanation));
+    }
+    return sorted(weighed).getFirst();
+  }
+
+  /// One more round with the covariance of the best so far. Readings that the best calls suspect
+  /// count for nothing in it, so every explanation is also weighed together with them.
+  private static Judged weighRound(
+      Judge judge,
+      Explanation best,
+      RowModel rows,
+      Priors priors,
+      Map<List<NamedFault>, Judged> weighed) {
+    Cholesky own = new Cholesky(rows.covariance(best));
+    List<Fault> suspects = best.faults().stream().filter(f -> !f.ofMagnet()).toList();
+    for (Explanation screened : new Screen(rows, own, priors).likeliest(LATER)) {
+      weighed.computeIfAbsent(screened.key(), key -> judge.judge(screened));
+      if (!suspects.isEmpty()) {
+        Explanation with = screened.ofMagnets().withAll(suspects);
+        weighed.computeIfAbsent(with.key(), key -> judge.judge(with));
+      }
     }
     return sorted(weighed).getFirst();
   }

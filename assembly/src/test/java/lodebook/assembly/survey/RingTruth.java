@@ -4,14 +4,19 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.random.RandomGenerator;
 import lodebook.assembly.field.Pose;
 import lodebook.assembly.field.PosedBody;
 import lodebook.assembly.field.Vector3;
 import lodebook.assembly.layout.Component;
+import lodebook.assembly.layout.Facing;
 import lodebook.assembly.layout.Layout;
+import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.layout.RingDesign;
+import lodebook.assembly.layout.RingPolarisation;
 import lodebook.assembly.layout.Spot;
 import lodebook.assembly.layout.Spread;
 import lodebook.assembly.magnet.MagnetBody;
@@ -32,21 +37,32 @@ final class RingTruth {
   private final Map<Integer, PlacedMagnet> recorded = new HashMap<>();
   private final List<Magnet> magnets = new ArrayList<>();
 
+  RingTruth(RingDesign design, int filled, List<Fault> faults, RandomGenerator random) {
+    this(design, MutualMagnetisation.of(design), filled, faults, random);
+  }
+
+  /// @param mutual how the magnets answer to each other's field, every slot filled
   /// @param filled number of slots filled, from slot 1 on
   /// @param faults what is wrong
-  RingTruth(RingDesign design, int filled, List<Fault> faults, RandomGenerator random) {
+  RingTruth(
+      RingDesign design,
+      MutualMagnetisation mutual,
+      int filled,
+      List<Fault> faults,
+      RandomGenerator random) {
     this.design = design;
     this.random = random;
     Spread spread = design.layout().spread();
+    double[] remanence = new double[design.slots()];
+    double[] lean = new double[design.slots()];
+    List<Facing> facings = new ArrayList<>(design.ruleFacings());
+    Set<Integer> present = new TreeSet<>();
     for (int slot = 1; slot <= filled; slot++) {
       double tesla = MEAN_TESLA * (1 + LOT_SPREAD * random.nextGaussian());
       double measured = tesla * (1 + PIECE_READING_ERROR * random.nextGaussian());
       recorded.put(
           slot, new PlacedMagnet(new Strength(measured, PIECE_READING_ERROR * measured), -0.0012));
-      double lean = Math.toRadians(spread.facingDegrees()) * random.nextGaussian();
-      double out = spread.pocketMetres() * random.nextGaussian();
-      double next = spread.pocketMetres() * random.nextGaussian();
-      double angle = design.layout().angleFromFirstRadians(slot);
+      lean[slot - 1] = spread.facingDegrees() * random.nextGaussian();
       double facing = design.layout().ruleFacing(slot).radians();
       double[] north = {tesla * Math.cos(facing), tesla * Math.sin(facing)};
       for (Fault fault : faults) {
@@ -54,13 +70,29 @@ final class RingTruth {
           fault.polarise(north[0], north[1], north, 0);
         }
       }
+      remanence[slot - 1] = Math.hypot(north[0], north[1]);
+      facings.set(
+          slot - 1, new Facing(Math.toDegrees(Math.atan2(north[1], north[0])) + lean[slot - 1]));
+      if (remanence[slot - 1] > 0) {
+        present.add(slot);
+      }
+    }
+    RingPolarisation polarisation =
+        mutual.withOnly(present).answerTo(RingPolarisation.of(remanence, facings));
+    for (int slot : present) {
+      double out = spread.pocketMetres() * random.nextGaussian();
+      double next = spread.pocketMetres() * random.nextGaussian();
+      double angle = design.layout().angleFromFirstRadians(slot);
       Vector3 centre =
           new Vector3(design.layout().slotRadiusMetres() + out, next, 0).turnedAboutZ(angle);
-      double turn = angle + design.bodyTurnRadians(slot, design.layout().ruleFacing(slot)) + lean;
+      double turn =
+          angle
+              + design.bodyTurnRadians(slot, design.layout().ruleFacing(slot))
+              + Math.toRadians(lean[slot - 1]);
       magnets.add(
           new Magnet(
               new PosedBody(MagnetBody.of(design.typeAt(slot)), Pose.turnedAboutZ(centre, turn)),
-              new Vector3(north[0], north[1], 0).turnedAboutZ(angle + lean)));
+              new Vector3(polarisation.out(slot), polarisation.next(slot), 0).turnedAboutZ(angle)));
     }
   }
 

@@ -45,6 +45,34 @@ final class Rings {
     return ring(12, 2, Focus.OUT, 22, 25.5, block(5, 5, 10), components);
   }
 
+  static RingDesign rods16(List<Component> components) {
+    MagnetType rod =
+        new MagnetType(
+            "ROD", Shape.ROD, 0, 0, 0.010, 0.005, 0, 0, "N42", 5e-5, "Ni-Cu-Ni", 1.05, 0);
+    return ring(4, 4, Focus.IN, 15, 11, rod, components);
+  }
+
+  static RingDesign arcs12(List<Component> components) {
+    MagnetType arc =
+        new MagnetType(
+            "ARC", Shape.ARC, 0, 0, 0.010, 0.024, 0.016, 27, "N42", 5e-5, "Ni-Cu-Ni", 1.05, 0);
+    return ring(3, 4, Focus.OUT, 10, 13.2, arc, components);
+  }
+
+  static RingDesign discs20(List<Component> components) {
+    MagnetType disc =
+        new MagnetType(
+            "DSC", Shape.DISC, 0.003, 0, 0, 0.005, 0, 0, "N42", 5e-5, "Ni-Cu-Ni", 1.05, 0);
+    return ring(10, 2, Focus.OUT, 20, 23, disc, components);
+  }
+
+  static RingDesign recoil12(List<Component> components) {
+    MagnetType block =
+        new MagnetType(
+            "BLR", Shape.BLOCK, 0.004, 0.004, 0.010, 0, 0, 0, "N42", 5e-5, "Ni-Cu-Ni", 1.05, 0);
+    return ring(3, 4, Focus.OUT, 10, 13, block, components);
+  }
+
   static MagnetType block(double thickness, double width, double length) {
     return new MagnetType(
         "BLK",

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.SplittableRandom;
 import java.util.TreeSet;
+import java.util.function.BiFunction;
 import lodebook.assembly.layout.RingDesign;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
@@ -39,15 +40,13 @@ class SurveyTruthStudy {
         boolean weak = line.getKey().startsWith("weak");
         assertTrue(
             weak || count.wrongOnes().size() <= Math.max(1, trials / 100),
-            () -> line.getKey() + " " + count.wrongOnes());
+            () -> line.getKey() + " " + count + " " + count.wrongOnes().getFirst());
       }
     }
   }
 
   private static String signs(
-      int trials,
-      Map.Entry<String, java.util.function.BiFunction<SplittableRandom, Integer, Trials.Trial>>
-          line) {
+      int trials, Map.Entry<String, BiFunction<SplittableRandom, Integer, Trials.Trial>> line) {
     int right = 0;
     for (int i = 0; i < trials; i++) {
       Trials.Trial trial = line.getValue().apply(new SplittableRandom(SEED + i), i);
@@ -70,6 +69,10 @@ class SurveyTruthStudy {
     rings.put("24 slots, k 2, out, radial and tangential", Rings.blocks24(Rings.BOTH));
     rings.put("40 slots, k 8, out, radial and tangential", Rings.blocks40(Rings.BOTH));
     rings.put("48 slots, k 4, in, radial and tangential", Rings.blocks48(Rings.BOTH));
+    rings.put("16 rods, k 4, in, recoil 1.05", Rings.rods16(Rings.BOTH));
+    rings.put("12 arcs, k 4, out, recoil 1.05", Rings.arcs12(Rings.BOTH));
+    rings.put("20 discs, k 2, out, recoil 1.05", Rings.discs20(Rings.BOTH));
+    rings.put("12 blocks, k 4, out, recoil 1.05", Rings.recoil12(Rings.BOTH));
     return rings;
   }
 }

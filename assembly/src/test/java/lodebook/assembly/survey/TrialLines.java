@@ -36,19 +36,39 @@ final class TrialLines {
     lines.put("60 % filled, 1 reversed", Trials.faults(design, part, List.of(reversed)));
     lines.put("60 % filled, 2 reversed", Trials.faults(design, part, List.of(reversed, reversed)));
     lines.put(
-        "sign inverted", slip(design, random -> measuring(Measuring.Sign.INVERTED, 1, false, 0)));
+        "sign inverted",
+        slip(
+            design,
+            random -> measuring(Measuring.Sign.INVERTED, 1, false, Measuring.UnitSlip.AS_STATED)));
     lines.put(
         "other start",
         slip(
             design,
-            random -> measuring(Measuring.Sign.AS_SET, 2 + random.nextInt(slots - 1), false, 0)));
-    lines.put("opposite", slip(design, random -> measuring(Measuring.Sign.AS_SET, 1, true, 0)));
+            random ->
+                measuring(
+                    Measuring.Sign.AS_SET,
+                    2 + random.nextInt(slots - 1),
+                    false,
+                    Measuring.UnitSlip.AS_STATED)));
+    lines.put(
+        "opposite",
+        slip(
+            design,
+            random -> measuring(Measuring.Sign.AS_SET, 1, true, Measuring.UnitSlip.AS_STATED)));
     lines.put(
         "gauss written as mT",
-        slip(design, random -> measuring(Measuring.Sign.AS_SET, 1, false, 1)));
+        slip(
+            design,
+            random ->
+                measuring(
+                    Measuring.Sign.AS_SET, 1, false, Measuring.UnitSlip.GAUSS_AS_MILLITESLA)));
     lines.put(
         "mT written as gauss",
-        slip(design, random -> measuring(Measuring.Sign.AS_SET, 1, false, 2)));
+        slip(
+            design,
+            random ->
+                measuring(
+                    Measuring.Sign.AS_SET, 1, false, Measuring.UnitSlip.MILLITESLA_AS_GAUSS)));
     lines.put("one wild reading", wild(design));
     return lines;
   }
@@ -58,12 +78,13 @@ final class TrialLines {
     return Trials.faults(design, design.slots(), List.of(new Fault(0, kind, amount)));
   }
 
-  private static Measuring measuring(Measuring.Sign sign, int start, boolean opposite, int unit) {
+  private static Measuring measuring(
+      Measuring.Sign sign, int start, boolean opposite, Measuring.UnitSlip unit) {
     return new Measuring(
         sign,
         start,
         opposite ? Measuring.Direction.OPPOSITE : Measuring.Direction.AS_NUMBERED,
-        Measuring.UnitSlip.values()[unit]);
+        unit);
   }
 
   private static BiFunction<SplittableRandom, Integer, Trials.Trial> slip(

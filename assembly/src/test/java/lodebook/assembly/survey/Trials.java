@@ -9,6 +9,7 @@ import java.util.SplittableRandom;
 import java.util.TreeSet;
 import java.util.function.BiFunction;
 import java.util.stream.Collectors;
+import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.RingDesign;
 
 /// Counts how often surveys with a known truth are explained rightly.
@@ -119,6 +120,7 @@ final class Trials {
   /// Surveys of a ring with some faults of given kinds in random slots.
   static BiFunction<SplittableRandom, Integer, Trial> faults(
       RingDesign design, int filled, List<Fault> kinds) {
+    MutualMagnetisation mutual = MutualMagnetisation.of(design);
     return (random, i) -> {
       List<Integer> slots = new ArrayList<>();
       while (slots.size() < kinds.size()) {
@@ -131,7 +133,7 @@ final class Trials {
       for (int k = 0; k < kinds.size(); k++) {
         faults.add(new Fault(slots.get(k), kinds.get(k).kind(), kinds.get(k).amount()));
       }
-      RingTruth truth = new RingTruth(design, filled, faults, random);
+      RingTruth truth = new RingTruth(design, mutual, filled, faults, random);
       double gain = METER.accuracy() * random.nextGaussian();
       return new Trial(
           truth.recorded(),
