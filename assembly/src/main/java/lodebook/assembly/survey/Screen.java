@@ -119,7 +119,7 @@ final class Screen {
           new Explanation(Arrays.stream(scored.what()).mapToObj(faults::get).toList());
       found.add(new Best.Scored<>(scored.score(), explanation));
       boolean small =
-          scored.what().length == 0 || scored.what().length == 1 && singles++ < SUSPECTS_FROM;
+          scored.what().length == 0 || (scored.what().length == 1 && singles++ < SUSPECTS_FROM);
       if (small || rank++ < SUSPECTS_FROM) {
         found.addAll(withSuspects(scored, explanation));
       }
