@@ -51,7 +51,10 @@ final class Conclusion {
     List<MeasureNext> next = new ArrayList<>();
     Verdict verdict;
     Diagnosis.Reason reason;
-    if (odds < LEAST_ODDS) {
+    if (best.explanation().faults().isEmpty() && !notShown().isEmpty()) {
+      verdict = Verdict.CANNOT_TELL;
+      reason = Diagnosis.Reason.NOT_ALL_SHOWN;
+    } else if (odds < LEAST_ODDS) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.TOO_CLOSE;
       next.addAll(partingReadings(best, second));
@@ -61,12 +64,9 @@ final class Conclusion {
     } else if (!best.explanation().faults().isEmpty()) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.SUSPECT_READING;
-    } else if (notShown().isEmpty()) {
+    } else {
       verdict = Verdict.PASS;
       reason = Diagnosis.Reason.SHOWN_RIGHT;
-    } else {
-      verdict = Verdict.CANNOT_TELL;
-      reason = Diagnosis.Reason.NOT_ALL_SHOWN;
     }
     next.addAll(againReadings(best.explanation()));
     if (verdict != Verdict.PASS) {
