@@ -84,6 +84,9 @@ public final class MutualMagnetisation {
 
   /// Readings per tesla of remanence instead of per tesla of polarisation.
   public FieldMatrix perRemanence(FieldMatrix perPolarisation) {
+    if (rigid()) {
+      return perPolarisation;
+    }
     int rows = perPolarisation.rows();
     double[][] both = new double[rows][2 * slots];
     for (int row = 0; row < rows; row++) {
@@ -104,6 +107,15 @@ public final class MutualMagnetisation {
       }
     }
     return result;
+  }
+
+  private boolean rigid() {
+    for (double chi : susceptibility) {
+      if (chi != 0) {
+        return false;
+      }
+    }
+    return filled.cardinality() == slots;
   }
 
   /// (I − χN)⁻¹ over the filled slots, zero elsewhere.

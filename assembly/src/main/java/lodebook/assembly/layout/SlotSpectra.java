@@ -7,11 +7,11 @@ import lodebook.assembly.field.Body;
 /// polarisation of one magnet at angle 0.
 ///
 /// Sampled at as many points as it takes for the highest coefficients to fall below 10⁻⁷ of the
-/// greatest, which bounds the aliasing of the rest; coefficients below 10⁻⁹ of the greatest at the
+/// greatest, which bounds the aliasing of the rest; coefficients below 10⁻⁷ of the greatest at the
 /// end are dropped.
 final class SlotSpectra {
   private static final double ALIASING = 1e-7;
-  private static final double NEGLIGIBLE = 1e-9;
+  private static final double NEGLIGIBLE = 1e-7;
   private static final int FIRST_SAMPLES = 128;
   private static final int MOST_SAMPLES = 8192;
 

@@ -12,7 +12,7 @@ public final class Spectrum {
     this.im = im;
   }
 
-  /// The highest h kept; what lies beyond is below 10⁻⁹ of the greatest of a single magnet's.
+  /// The highest h kept; what lies beyond is below 10⁻⁷ of the greatest of a single magnet's.
   public int highest() {
     return re.length - 1;
   }
