@@ -3,13 +3,11 @@ package lodebook.assembly.layout;
 import java.util.List;
 import lodebook.assembly.field.Body;
 import lodebook.assembly.magnet.MagnetBody;
-import org.jspecify.annotations.Nullable;
 
 /// The field of a ring's magnets as a linear map from their polarisations to readings.
 ///
-/// Every magnet is uniformly polarised in the ring's plane. The matrices refer to polarisations,
-/// or, for a field made by [#perRemanence], to remanences, the magnets' answer to each other's
-/// field included.
+/// Every magnet is uniformly polarised in the ring's plane. The matrices refer to polarisations;
+/// [MutualMagnetisation] makes them refer to remanences.
 public final class RingField {
   /// Step of the central differences, metres: relative error about 10⁻⁶ at 3 mm from a magnet.
   private static final double STEP = 2e-6;
@@ -18,7 +16,6 @@ public final class RingField {
   private final double[] slotAngle;
   private final Body[] body;
   private final double[] turn;
-  private final @Nullable MutualMagnetisation mutual;
 
   /// A ring whose bodies stand as the layout's rule wants them.
   public RingField(RingDesign design) {
@@ -31,26 +28,6 @@ public final class RingField {
   /// @param design the ring
   /// @param facings one for each slot, slot 1 first
   public RingField(RingDesign design, List<Facing> facings) {
-    this(design, facings, null);
-  }
-
-  /// The field per tesla of each slot's remanence instead of its polarisation: the magnets answer
-  /// to their own and each other's field with their types' recoil permeability.
-  ///
-  /// @param design the ring, its bodies standing as the rule wants them
-  /// @param filledSlots the slots that hold a magnet, from 1; what is asked of the others is void
-  public static RingField perRemanence(RingDesign design, Iterable<Integer> filledSlots) {
-    return new RingField(
-        design, design.ruleFacings(), MutualMagnetisation.of(design).withOnly(filledSlots));
-  }
-
-  /// The field per tesla of remanence of a ring with a magnet in every slot.
-  public static RingField perRemanence(RingDesign design) {
-    return new RingField(design, design.ruleFacings(), MutualMagnetisation.of(design));
-  }
-
-  private RingField(RingDesign design, List<Facing> facings, @Nullable MutualMagnetisation mutual) {
-    this.mutual = mutual;
     int slots = design.slots();
     slotRadius = design.layout().slotRadiusMetres();
     slotAngle = new double[slots];
@@ -63,7 +40,7 @@ public final class RingField {
     }
   }
 
-  /// Readings at places, per tesla of each slot's polarisation (or remanence).
+  /// Readings at places, per tesla of each slot's polarisation.
   public FieldMatrix at(List<ReadingPlace> places) {
     FieldMatrix matrix = new FieldMatrix(places.size(), body.length);
     double[] f = new double[3];
@@ -82,7 +59,7 @@ public final class RingField {
         put(matrix, row, i, place.component(), c, s, f);
       }
     }
-    return answered(matrix);
+    return matrix;
   }
 
   /// Derivatives of the readings at places with respect to the positions of magnets and probe.
@@ -115,16 +92,7 @@ public final class RingField {
         put(result.probeUp(), row, i, component, c, s, slope(i, x, y, z, 0, 0, 1));
       }
     }
-    return new FieldDerivatives(
-        answered(result.magnetOut()),
-        answered(result.magnetNext()),
-        answered(result.probeOut()),
-        answered(result.probeNext()),
-        answered(result.probeUp()));
-  }
-
-  private FieldMatrix answered(FieldMatrix perPolarisation) {
-    return mutual == null ? perPolarisation : mutual.perRemanence(perPolarisation);
+    return result;
   }
 
   private static double[] combined(double byA, double[] a, double byB, double[] b) {

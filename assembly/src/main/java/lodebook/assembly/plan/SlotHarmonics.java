@@ -2,11 +2,10 @@ package lodebook.assembly.plan;
 
 import java.util.List;
 import lodebook.assembly.layout.Facing;
+import lodebook.assembly.layout.FieldMatrix;
 import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.RingDesign;
-import lodebook.assembly.layout.RingHarmonics;
-import lodebook.assembly.layout.RingPolarisation;
-import lodebook.assembly.layout.Spectrum;
+import lodebook.assembly.layout.WorkingCircle;
 
 /// What each slot's magnet gives to the harmonics of a ring's radial field on the working circle.
 ///
@@ -35,25 +34,27 @@ public final class SlotHarmonics {
     this.imaginary = copy(imaginary);
   }
 
-  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first; magnets answer
-  /// to each other's field as their type's recoil permeability says.
+  /// Harmonics of a ring whose facings are given, one for each slot, slot 1 first; the magnets
+  /// answer to each other's field with their types' recoil permeability.
   public static SlotHarmonics of(RingDesign design, List<Facing> facings) {
-    RingHarmonics ring = new RingHarmonics(design);
+    WorkingCircle circle = new WorkingCircle(design, facings);
     MutualMagnetisation mutual = MutualMagnetisation.of(design);
-    int slots = design.slots();
-    double[][] real = new double[ring.highest() + 1][slots];
-    double[][] imaginary = new double[ring.highest() + 1][slots];
-    for (int i = 0; i < slots; i++) {
-      double[] one = new double[slots];
-      one[i] = 1;
-      Spectrum spectrum = ring.spectrum(mutual.answerTo(RingPolarisation.of(one, facings)));
-      for (int h = 0; h <= ring.highest(); h++) {
-        real[h][i] = spectrum.re(h);
-        imaginary[h][i] = spectrum.im(h);
-      }
-    }
+    double[][] real = along(facings, mutual.perRemanence(circle.realParts()));
+    double[][] imaginary = along(facings, mutual.perRemanence(circle.imaginaryParts()));
     return new SlotHarmonics(
         design.layout().polePairs(), design.layout().segmentsPerPolePair(), real, imaginary);
+  }
+
+  private static double[][] along(List<Facing> facings, FieldMatrix parts) {
+    double[][] lines = new double[parts.rows()][parts.slots()];
+    for (int i = 0; i < parts.slots(); i++) {
+      double out = Math.cos(facings.get(i).radians());
+      double next = Math.sin(facings.get(i).radians());
+      for (int h = 0; h < parts.rows(); h++) {
+        lines[h][i] = out * parts.perOut(h, i + 1) + next * parts.perNext(h, i + 1);
+      }
+    }
+    return lines;
   }
 
   /// Number of slots.
