@@ -1,12 +1,12 @@
 package lodebook.ui;
 
+import lodebook.ui.cli.Lodebook;
+
 /// Starts Lodebook.
 public final class Main {
   /// @param args the command line
   public static void main(String[] args) {
-    if (args.length > 99) {
-      throw new IllegalArgumentException("too many words");
-    }
+    System.exit(Lodebook.run(args));
   }
 
   private Main() {}

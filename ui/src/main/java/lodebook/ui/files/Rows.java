@@ -1,6 +1,7 @@
 package lodebook.ui.files;
 
 import java.util.Arrays;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
 
@@ -30,15 +31,23 @@ public final class Rows<T> {
     return all.size();
   }
 
-  /// A problem that only the book knew of, at its place in the file.
+  /// Problems that only the book knew of, at their places in the file.
+  public List<Problem> problems(List<RowFault> faults) {
+    Set<Integer> wanted = new HashSet<>();
+    faults.forEach(f -> wanted.add(lines[f.row()]));
+    FieldPlaces places = FieldPlaces.scan(source, header.separator(), wanted);
+    return faults.stream().map(f -> problem(f, places)).toList();
+  }
+
+  private Problem problem(RowFault fault, FieldPlaces places) {
+    Place place = places.of(lines[fault.row()], header.indexOf(fault.column()));
+    return new Problem(source.path().toString(), place.line(), place.column(), fault.sentence());
+  }
+
+  /// What the book says against a row.
   ///
   /// @param row index of the row, from 0
   /// @param column name of the column at fault
   /// @param sentence what is wrong
-  public Problem problem(int row, String column, String sentence) {
-    int line = lines[row];
-    Place place =
-        FieldPlaces.scan(source, header.separator(), Set.of(line)).of(line, header.indexOf(column));
-    return new Problem(source.path().toString(), place.line(), place.column(), sentence);
-  }
+  public record RowFault(int row, String column, String sentence) {}
 }

@@ -6,6 +6,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import java.util.TreeMap;
+import lodebook.assembly.magnet.MagnetType;
 import lodebook.assembly.magnet.Shape;
 
 /// Reads magnet types.
@@ -42,15 +43,15 @@ public final class TypeFile {
 
   private TypeFile() {}
 
-  /// All types of a file.
+  /// All types of a file; a recoil permeability that is not stated is 0 and stands for the grade's.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static Rows<TypeRow> read(Source source) {
+  public static Rows<MagnetType> read(Source source) {
     Once codes = new Once();
     return CsvTable.read(source, COLUMNS, cells -> row(cells, codes));
   }
 
-  private static TypeRow row(Cells cells, Once codes) {
+  private static MagnetType row(Cells cells, Once codes) {
     codes.check(cells, "type");
     Shape shape = cells.oneOf("shape", SHAPES, Shape.BLOCK);
     boolean known = SHAPES.containsKey(cells.raw("shape"));
@@ -64,7 +65,7 @@ public final class TypeFile {
       cells.problem("recoil_permeability", "type.permeability", cells.raw("recoil_permeability"));
     }
     Double magnetisation = cells.numberOrNull("magnetisation_deg");
-    return new TypeRow(
+    return new MagnetType(
         cells.raw("type"),
         shape,
         size[0] / 1000,
@@ -76,7 +77,7 @@ public final class TypeFile {
         cells.text("grade"),
         cells.notNegative("tolerance_mm") / 1000,
         cells.raw("coating"),
-        permeability,
+        permeability == null ? 0 : permeability,
         magnetisation == null ? 0 : magnetisation);
   }
 

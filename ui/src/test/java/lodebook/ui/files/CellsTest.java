@@ -19,7 +19,7 @@ class CellsTest {
   }
 
   private void check(String importer, String rows, String... expected) {
-    Importer kind = Importer.byName().get(importer);
+    Importer kind = Importer.named(importer);
     Source file = bench.file("a.csv", kind.header() + "\n" + rows);
     assertEquals(List.of(expected), bench.problems(file, kind.reader()));
   }
@@ -57,7 +57,7 @@ class CellsTest {
 
   @Test
   void sameRowAgainWhenAsked() {
-    Importer kind = Importer.byName().get("piece");
+    Importer kind = Importer.named("piece");
     Source file = bench.file("a.csv", kind.header() + "\n1,C,1,3,G,1,20\n1,C,1,3,G,1,20\n");
     assertEquals(2, PieceReadingFile.read(file, "L-2404", true).count());
   }

@@ -5,7 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Map;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -170,7 +169,7 @@ class CsvFormTest {
     assertEquals("row 3,\n \"left\"", MoveFile.read(file).all().getFirst().cell());
     assertEquals(
         "a.csv:4:11: there",
-        MoveFile.read(file).problem(1, "cell", "there").toString().replace(folder + "/", ""));
+        MoveFile.read(file).problems(List.of(new Rows.RowFault(1, "cell", "there"))).getFirst().toString().replace(folder + "/", ""));
     assertEquals(
         List.of("a.csv:3:11: a quoted field begins here and never ends, expected a closing quote"),
         bench.problems(
@@ -211,6 +210,6 @@ class CsvFormTest {
   }
 
   private static Importer importer(String name) {
-    return Map.copyOf(Importer.byName()).get(name);
+    return Importer.named(name);
   }
 }

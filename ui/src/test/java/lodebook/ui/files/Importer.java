@@ -1,9 +1,7 @@
 package lodebook.ui.files;
 
 import java.util.Arrays;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.function.Function;
 
 /// An importer with a right file of its kind.
@@ -72,10 +70,8 @@ record Importer(
               "piece,tray,cell",
               List.of("L-2404/0001,C,9", "L-2404/2,D,1")));
 
-  static Map<String, Importer> byName() {
-    Map<String, Importer> all = new LinkedHashMap<>();
-    ALL.forEach(i -> all.put(i.name, i));
-    return all;
+  static Importer named(String name) {
+    return ALL.stream().filter(i -> i.name.equals(name)).findFirst().orElseThrow();
   }
 
   String plain() {

@@ -1,0 +1,55 @@
+package lodebook.ui.cli;
+
+import java.util.List;
+import lodebook.db.refusal.RowProblem;
+import lodebook.db.refusal.RowsRefused;
+import lodebook.ui.files.BadFile;
+import lodebook.ui.files.Problem;
+import lodebook.ui.files.Rows;
+import lodebook.ui.words.Words;
+
+/// The book refuses rows of a file: the same list of places as for a file that is wrong in itself.
+final class FileRefused extends RuntimeException {
+  private static final long serialVersionUID = 1;
+
+  private final transient List<Problem> problems;
+  private final int more;
+  private final int exitCode;
+
+  private FileRefused(List<Problem> problems, int more, RowsRefused cause) {
+    super(cause);
+    this.problems = problems;
+    this.more = more;
+    this.exitCode = cause.kind().exitCode();
+  }
+
+  /// The refusal with the places of its rows.
+  static FileRefused of(RowsRefused refused, Rows<?> rows, Session session) {
+    List<RowProblem> all = refused.problems();
+    List<Rows.RowFault> faults =
+        all.stream()
+            .limit(BadFile.SHOWN)
+            .map(p -> new Rows.RowFault(p.row(), p.column(), sentence(p, session)))
+            .toList();
+    return new FileRefused(rows.problems(faults), all.size() - faults.size(), refused);
+  }
+
+  private static String sentence(RowProblem problem, Session session) {
+    String sentence = session.sentences().say(problem.refusal());
+    String remedy = problem.refusal().remedy();
+    Words words = session.words();
+    return remedy == null ? sentence : words.say("row.remedy", sentence, remedy);
+  }
+
+  List<Problem> problems() {
+    return problems;
+  }
+
+  int more() {
+    return more;
+  }
+
+  int exitCode() {
+    return exitCode;
+  }
+}
