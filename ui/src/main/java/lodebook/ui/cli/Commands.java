@@ -16,8 +16,8 @@ import picocli.CommandLine.UnmatchedArgumentException;
 
 /// The tree of commands: a noun, then a verb.
 ///
-/// Only the noun that is spoken of gets its verbs, so that a command starts fast; help and completion
-/// see them all.
+/// Only the noun that is spoken of gets its verbs, so that a command starts fast; help and
+/// completion see them all.
 final class Commands {
   private static final int WIDTH = 80;
 
@@ -82,8 +82,7 @@ final class Commands {
         : List.of();
   }
 
-  private static @Nullable String unknownCommand(
-      ParameterException wrong) {
+  private static @Nullable String unknownCommand(ParameterException wrong) {
     if (wrong instanceof UnmatchedArgumentException unmatched
         && !unmatched.isUnknownOption()
         && !unmatched.getCommandLine().getSubcommands().isEmpty()) {

@@ -45,8 +45,7 @@ final class Failures {
       }
       case CannotWrite cannot -> {
         err.println(
-            "lodebook: "
-                + session.words().say("file.not-written", cannot.path(), cannot.reason()));
+            "lodebook: " + session.words().say("file.not-written", cannot.path(), cannot.reason()));
         yield WRONG_INPUT;
       }
       default -> defect(failure);

@@ -1,6 +1,8 @@
 package lodebook.ui.cli;
 
 import java.io.StringWriter;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -11,8 +13,10 @@ import tools.jackson.core.ObjectWriteContext;
 import tools.jackson.core.json.JsonFactory;
 
 /// A JSON document being made: an object with its keys in the order in which they are put, or a
-/// list. Numbers are written as they are, infinite ones and NaN as null.
+/// list. Numbers are rounded to twelve digits; infinite ones and NaN are null.
 final class Json {
+  private static final MathContext DIGITS = new MathContext(12);
+
   private final @Nullable Map<String, @Nullable Object> fields;
   private final @Nullable List<@Nullable Object> items;
 
@@ -84,7 +88,7 @@ final class Json {
 
   private static void number(JsonGenerator to, double number) {
     if (Double.isFinite(number)) {
-      to.writeNumber(number);
+      to.writeNumber(new BigDecimal(number).round(DIGITS).doubleValue());
     } else {
       to.writeNull();
     }

@@ -67,7 +67,9 @@ public final class Lodebook {
     }
     String name = command.getCommandSpec().qualifiedName();
     err.println(
-        session.words().say("line.help", name.replaceFirst("^lodebook ?", "lodebook help ").strip()));
+        session
+            .words()
+            .say("line.help", name.replaceFirst("^lodebook ?", "lodebook help ").strip()));
     return Failures.WRONG_LINE;
   }
 }

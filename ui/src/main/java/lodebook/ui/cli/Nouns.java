@@ -9,7 +9,39 @@ final class Nouns {
   /// The nouns.
   static List<Noun> all() {
     return List.of(
-        new Noun("person", s -> List.of(new PersonAdd(s), new PersonRole(s), new PersonRetire(s), new PersonList(s))));
+        new Noun("person", Nouns::person),
+        new Noun("meter", s -> List.of(new MeterAdd(s), new MeterList(s))),
+        new Noun("grade", s -> List.of(new GradeImport(s), new GradeList(s))),
+        new Noun("type", s -> List.of(new TypeImport(s), new TypeList(s))),
+        new Noun("lot", Nouns::lot),
+        new Noun("piece", Nouns::piece),
+        new Noun("tray", s -> List.of(new TrayShow(s), new TrayMove(s), new TrayUnsure(s))));
+  }
+
+  private static List<Verb> person(Session s) {
+    return List.of(new PersonAdd(s), new PersonRole(s), new PersonRetire(s), new PersonList(s));
+  }
+
+  private static List<Verb> lot(Session s) {
+    return List.of(
+        new LotReceive(s),
+        new LotList(s),
+        new LotShow(s),
+        new LotAccept(s),
+        new LotHold(s),
+        new LotFree(s),
+        new LotReject(s),
+        new LotCount(s));
+  }
+
+  private static List<Verb> piece(Session s) {
+    return List.of(
+        new PieceTakeIn(s),
+        new PieceList(s),
+        new PieceShow(s),
+        new PieceHold(s),
+        new PieceFree(s),
+        new PieceScrap(s));
   }
 
   /// The commands that are one word.

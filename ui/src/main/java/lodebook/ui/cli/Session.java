@@ -60,9 +60,7 @@ final class Session {
   /// The book that is meant.
   BookAddress address() {
     String named = common.book == null ? around.variable("LODEBOOK_BOOK") : common.book;
-    return named == null
-        ? new BookAddress.Folder(around.defaultBook())
-        : BookAddress.of(named);
+    return named == null ? new BookAddress.Folder(around.defaultBook()) : BookAddress.of(named);
   }
 
   /// Who opens a book, and what for.

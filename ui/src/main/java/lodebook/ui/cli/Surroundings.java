@@ -28,9 +28,7 @@ record Surroundings(Map<String, String> env, PrintStream out, PrintStream err, C
       String content = variable(name);
       if (content != null) {
         String language = content.split("[._@-]", 2)[0];
-        return language.equals("C") || language.equals("POSIX")
-            ? Locale.ROOT
-            : Locale.of(language);
+        return language.equals("C") || language.equals("POSIX") ? Locale.ROOT : Locale.of(language);
       }
     }
     return Locale.ROOT;

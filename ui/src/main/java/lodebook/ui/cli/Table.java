@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
-/// A table for a terminal of 80 columns: columns of numbers to the right, texts to the left; where it
-/// would be wider, the widest column of texts is broken into lines.
+/// A table for a terminal of 80 columns: columns of numbers to the right, texts to the left; where
+/// it would be wider, the widest column of texts is broken into lines.
 final class Table {
   private static final int WIDTH = 80;
   private static final int GAP = 2;

@@ -188,6 +188,19 @@ final class JsonFields {
     return of(problems, value, key, known);
   }
 
+  /// A list of objects that may be missing.
+  List<JsonFields> objects(String key, List<String> known) {
+    JsonValue value = has(key) ? value(key, "json.list") : null;
+    if (value == null) {
+      return List.of();
+    }
+    if (!(value instanceof JsonValue.Items items)) {
+      problems.note(value.place(), "json.not-list", key, value.shown());
+      return List.of();
+    }
+    return items.values().stream().map(v -> of(problems, v, key, known)).toList();
+  }
+
   /// The key's value as written.
   String shown(String key) {
     JsonValue.Field field = fields.byName().get(key);

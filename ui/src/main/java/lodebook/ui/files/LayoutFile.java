@@ -1,5 +1,6 @@
 package lodebook.ui.files;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -15,7 +16,7 @@ import lodebook.assembly.layout.Spot;
 import lodebook.assembly.layout.Spread;
 import org.jspecify.annotations.Nullable;
 
-/// Reads the layout of a ring.
+/// Reads layouts of rings.
 public final class LayoutFile {
   private static final List<String> KEYS =
       List.of(
@@ -37,7 +38,8 @@ public final class LayoutFile {
           "adhesiveWorkingMinutes",
           "bodyTurns",
           "insertFrom",
-          "tolerance");
+          "tolerance",
+          "also");
   private static final List<String> PROBE_KEYS =
       List.of("radiusMillimetres", "heightMillimetres", "spots", "components");
   private static final List<String> SPREAD_KEYS =
@@ -57,17 +59,19 @@ public final class LayoutFile {
 
   private LayoutFile() {}
 
-  /// The layout of a file.
+  /// The layouts of a file: the one it states, and those that its key `also` lists.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static Layout read(Source source) {
+  public static List<Layout> read(Source source) {
     JsonProblems problems = new JsonProblems(source);
     JsonFields file =
         JsonFields.of(
             problems, JsonText.read(source, problems), source.words().say("json.the-file"), KEYS);
-    Layout layout = layout(file);
+    List<Layout> layouts = new ArrayList<>();
+    layouts.add(layout(file));
+    file.objects("also", KEYS).forEach(also -> layouts.add(layout(also)));
     problems.throwIfAny();
-    return layout;
+    return List.copyOf(layouts);
   }
 
   private static Layout layout(JsonFields file) {
@@ -167,7 +171,8 @@ public final class LayoutFile {
         spread.numberOr("pocketMillimetres", Bounds::notNegative, expected, 0.05) / 1000,
         spread.numberOr("facingDegrees", Bounds::notNegative, expected, usual.facingDegrees()),
         spread.numberOr("probeMillimetres", Bounds::notNegative, expected, 0.15) / 1000,
-        spread.numberOr("probeTiltDegrees", Bounds::notNegative, expected, usual.probeTiltDegrees()));
+        spread.numberOr(
+            "probeTiltDegrees", Bounds::notNegative, expected, usual.probeTiltDegrees()));
   }
 
   private static double tolerance(JsonFields file) {

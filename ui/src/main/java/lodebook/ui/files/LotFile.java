@@ -1,6 +1,7 @@
 package lodebook.ui.files;
 
 import java.util.List;
+import lodebook.db.stock.NewLot;
 
 /// Reads lots.
 public final class LotFile {
@@ -23,18 +24,18 @@ public final class LotFile {
   /// All lots of a file.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static Rows<LotRow> read(Source source) {
+  public static Rows<NewLot> read(Source source) {
     Once numbers = new Once();
     return CsvTable.read(source, COLUMNS, cells -> row(cells, numbers));
   }
 
-  private static LotRow row(Cells cells, Once numbers) {
+  private static NewLot row(Cells cells, Once numbers) {
     String lot = Numbers.check(cells, "lot", numbers);
     Double remanence = cells.numberOrNull("certificate_br_mT");
     if (remanence != null && !(remanence > 0 && remanence <= STRONGEST_MILLITESLA)) {
       cells.problem("certificate_br_mT", "lot.remanence", cells.raw("certificate_br_mT"));
     }
-    return new LotRow(
+    return new NewLot(
         lot,
         cells.text("type"),
         cells.text("supplier"),

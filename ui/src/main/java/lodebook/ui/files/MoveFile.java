@@ -1,6 +1,8 @@
 package lodebook.ui.files;
 
 import java.util.List;
+import lodebook.db.stock.CellMove;
+import lodebook.db.stock.PieceName;
 
 /// Reads moves of pieces between trays.
 public final class MoveFile {
@@ -11,16 +13,16 @@ public final class MoveFile {
   /// All moves of a file.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static Rows<MoveRow> read(Source source) {
+  public static Rows<CellMove> read(Source source) {
     Once pieces = new Once();
     Once places = new Once();
     return CsvTable.read(source, COLUMNS, cells -> row(cells, pieces, places));
   }
 
-  private static MoveRow row(Cells cells, Once pieces, Once places) {
-    PieceName piece = PieceName.of(cells, "piece");
+  private static CellMove row(Cells cells, Once pieces, Once places) {
+    PieceName piece = PieceText.of(cells, "piece");
     if (!piece.lot().isEmpty()) {
-      pieces.check(cells, "piece", piece.key(), "piece " + piece);
+      pieces.check(cells, "piece", PieceText.key(piece), "piece " + piece);
     }
     String tray = cells.text("tray");
     String cell = cells.text("cell");
@@ -29,6 +31,6 @@ public final class MoveFile {
     } else if (!tray.isEmpty() && !cell.isEmpty()) {
       places.check(cells, "cell", tray + " " + cell, "tray " + tray + " cell " + cell);
     }
-    return new MoveRow(piece, tray, cell);
+    return new CellMove(piece, tray, cell);
   }
 }

@@ -4,6 +4,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import lodebook.db.stock.ReadingRow;
 import org.jspecify.annotations.Nullable;
 
 /// Reads gaussmeter readings of single pieces.
@@ -19,8 +20,8 @@ public final class PieceReadingFile {
   private final String lot;
   private final boolean again;
   private final Once rows = new Once();
-  private final Map<String, Integer> pieceOfCell = new HashMap<>();
-  private final Map<Integer, String> cellOfPiece = new HashMap<>();
+  private final Map<String, Long> pieceOfCell = new HashMap<>();
+  private final Map<Long, String> cellOfPiece = new HashMap<>();
 
   private PieceReadingFile(String lot, boolean again) {
     this.lot = lot;
@@ -32,12 +33,12 @@ public final class PieceReadingFile {
   /// @param lot the shop's number of the lot that the pieces belong to
   /// @param again whether the same row may stand in the file more than once
   /// @throws BadFile where the file is wrong in itself
-  public static Rows<PieceReadingRow> read(Source source, String lot, boolean again) {
+  public static Rows<ReadingRow> read(Source source, String lot, boolean again) {
     return CsvTable.read(source, COLUMNS, new PieceReadingFile(lot, again)::row);
   }
 
-  private PieceReadingRow row(Cells cells) {
-    int piece = PieceName.numberIn(cells, "piece", lot);
+  private ReadingRow row(Cells cells) {
+    long piece = PieceText.numberIn(cells, "piece", lot);
     double value = cells.number("value");
     if (value < 0) {
       cells.problem("value", "piece.south", cells.raw("value"));
@@ -57,12 +58,11 @@ public final class PieceReadingFile {
           piece + "|" + value + "|" + unit + "|" + standoff + "|" + rest(cells),
           cells.raw("piece"));
     }
-    return new PieceReadingRow(
+    return new ReadingRow(
         piece,
-        cells.raw("tray"),
-        cells.raw("cell"),
-        value,
-        unit,
+        orNull(cells.raw("tray")),
+        orNull(cells.raw("cell")),
+        unit.tesla(value),
         standoff / 1000,
         cells.celsiusOrNull("temperature_C"),
         orNull(cells.raw("meter")),
@@ -85,7 +85,7 @@ public final class PieceReadingFile {
     return text.isEmpty() ? null : text;
   }
 
-  private void checkCell(Cells cells, int piece) {
+  private void checkCell(Cells cells, long piece) {
     String tray = cells.raw("tray");
     String cell = cells.raw("cell");
     if (tray.isEmpty() && cell.isEmpty()) {
@@ -101,7 +101,7 @@ public final class PieceReadingFile {
       return;
     }
     String where = tray + " " + cell;
-    Integer other = pieceOfCell.putIfAbsent(where.toLowerCase(Locale.ROOT), piece);
+    Long other = pieceOfCell.putIfAbsent(where.toLowerCase(Locale.ROOT), piece);
     if (other != null && other != piece) {
       cells.problem("cell", "piece.cell-taken", tray, cell, other);
     }

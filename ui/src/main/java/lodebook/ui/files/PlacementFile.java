@@ -2,6 +2,7 @@ package lodebook.ui.files;
 
 import java.util.List;
 import lodebook.assembly.layout.Facing;
+import lodebook.db.stock.PieceName;
 
 /// Reads what was put where.
 public final class PlacementFile {
@@ -26,9 +27,9 @@ public final class PlacementFile {
       slots.check(cells, "slot", Integer.toString(slot), "slot " + slot);
     }
     String text = cells.text("piece");
-    PieceName piece = PieceName.parse(text);
+    PieceName piece = PieceText.parse(text);
     if (piece != null) {
-      pieces.check(cells, "piece", piece.key(), "piece " + piece);
+      pieces.check(cells, "piece", PieceText.key(piece), "piece " + piece);
     } else if (!text.isEmpty() && !Numbers.isCode(text)) {
       cells.problem("piece", "cell.not-piece-or-lot", text);
     }

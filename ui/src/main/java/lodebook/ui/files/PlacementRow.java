@@ -14,7 +14,7 @@ import org.jspecify.annotations.Nullable;
 public record PlacementRow(
     int slot,
     String lot,
-    @Nullable Integer piece,
+    @Nullable Long piece,
     double facingDegrees,
     @Nullable Instant at,
     @Nullable String by) {}

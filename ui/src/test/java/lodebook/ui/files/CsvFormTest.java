@@ -6,6 +6,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.Stream;
+import lodebook.db.stock.CellMove;
+import lodebook.db.stock.PieceName;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -158,7 +160,7 @@ class CsvFormTest {
   void unknownColumnIsReportedAndNotRead() {
     Source file = bench.file("a.csv", "piece,tray,cell,remark\nL-1/1,T-1,3,dropped\n");
     assertEquals(
-        List.of(new MoveRow(new PieceName("L-1", 1), "T-1", "3")), MoveFile.read(file).all());
+        List.of(new CellMove(new PieceName("L-1", 1), "T-1", "3")), MoveFile.read(file).all());
     assertEquals(List.of("a.csv: column remark is not known and was not read"), bench.warnings());
   }
 
@@ -169,7 +171,11 @@ class CsvFormTest {
     assertEquals("row 3,\n \"left\"", MoveFile.read(file).all().getFirst().cell());
     assertEquals(
         "a.csv:4:11: there",
-        MoveFile.read(file).problems(List.of(new Rows.RowFault(1, "cell", "there"))).getFirst().toString().replace(folder + "/", ""));
+        MoveFile.read(file)
+            .problems(List.of(new Rows.RowFault(1, "cell", "there")))
+            .getFirst()
+            .toString()
+            .replace(folder + "/", ""));
     assertEquals(
         List.of("a.csv:3:11: a quoted field begins here and never ends, expected a closing quote"),
         bench.problems(

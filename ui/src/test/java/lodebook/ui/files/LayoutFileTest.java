@@ -78,8 +78,8 @@ class LayoutFileTest {
             false,
             InsertFrom.FACE,
             0.03);
-    assertEquals(expected, LayoutFile.read(bench.file("l.json", LAYOUT)));
-    assertEquals(expected, LayoutFile.read(bench.file("l.json", "\uFEFF" + LAYOUT)));
+    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", LAYOUT)));
+    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", "\uFEFF" + LAYOUT)));
   }
 
   @Test
