@@ -66,7 +66,9 @@ final class Commands {
   /// What is wrong with a command line, in a sentence.
   static String sentence(ParameterException wrong, Words words) {
     String unknown = unknownCommand(wrong);
-    return unknown == null ? wrong.getMessage() : words.say("line.no-command", unknown);
+    return unknown == null
+        ? String.valueOf(wrong.getMessage())
+        : words.say("line.no-command", unknown);
   }
 
   /// Commands or options that may have been meant.

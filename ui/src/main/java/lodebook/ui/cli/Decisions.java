@@ -14,9 +14,7 @@ final class Decisions {
     }
     Table table = new Table("WHEN", "BY", "DECIDED", "WHY");
     decisions.forEach(
-        d ->
-            table.row(
-                Amounts.minute(d.statedAt(), session.zone()), d.by(), d.state(), d.why()));
+        d -> table.row(Amounts.minute(d.statedAt(), session.zone()), d.by(), d.state(), d.why()));
     return table.text();
   }
 

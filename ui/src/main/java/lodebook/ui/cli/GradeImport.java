@@ -27,7 +27,8 @@ final class GradeImport extends FileVerb {
   int takeIn() {
     Rows<Grade> rows = GradeFile.read(session.source(need(file, "FILE")));
     importing(
-        rows, () -> session.change(book -> new Grades(book).importGrades(session.act(), rows.all())));
+        rows,
+        () -> session.change(book -> new Grades(book).importGrades(session.act(), rows.all())));
     session.done("grade.imported", rows.count());
     session.next("lodebook type import types.csv");
     return 0;

@@ -20,8 +20,7 @@ final class GradeList extends Verb {
   @Override
   int run() {
     List<Grade> grades = session.read(book -> new Grades(book).list());
-    Table table =
-        new Table("GRADE", ">Br mT", ">Br %/K", ">RECOIL", ">MOST C", "SOURCE");
+    Table table = new Table("GRADE", ">Br mT", ">Br %/K", ">RECOIL", ">MOST C", "SOURCE");
     grades.forEach(
         g ->
             table.row(

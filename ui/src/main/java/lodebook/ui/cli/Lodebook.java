@@ -5,6 +5,7 @@ import java.io.FileOutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.time.Clock;
+import java.time.ZoneId;
 import java.util.List;
 import java.util.Map;
 import picocli.CommandLine;
@@ -20,7 +21,7 @@ public final class Lodebook {
   public static int run(String[] args) {
     PrintStream out = stream(FileDescriptor.out);
     PrintStream err = stream(FileDescriptor.err);
-    int code = run(List.of(args), System.getenv(), out, err, Clock.systemDefaultZone());
+    int code = run(List.of(args), System.getenv(), out, err, Clock.system(ZoneId.systemDefault()));
     out.flush();
     err.flush();
     return code;

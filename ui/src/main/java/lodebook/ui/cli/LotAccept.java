@@ -9,7 +9,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "accept",
     description = "Let a lot be planned and placed.",
-    footer = {"", "Example:", "  lodebook lot accept L-2404 --why \"certificate and readings agree\""})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook lot accept L-2404 --why \"certificate and readings agree\""
+    })
 final class LotAccept extends Verb {
   @Parameters(paramLabel = "LOT", description = "number of the lot")
   private String lot = "";

@@ -27,7 +27,8 @@ final class LotReceive extends FileVerb {
   int takeIn() {
     Rows<NewLot> rows = LotFile.read(session.source(need(file, "FILE")));
     importing(
-        rows, () -> session.change(book -> new LotImport(book).importLots(session.act(), rows.all())));
+        rows,
+        () -> session.change(book -> new LotImport(book).importLots(session.act(), rows.all())));
     session.done("lot.imported", rows.count());
     session.next("lodebook piece import LOT readings.csv");
     return 0;

@@ -14,7 +14,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "add",
     description = "Add an instrument.",
-    footer = {"", "Example:", "  lodebook meter add GM-1 --accuracy-percent 1 --calibration-due 2027-06-30"})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook meter add GM-1 --accuracy-percent 1 --calibration-due 2027-06-30"
+    })
 final class MeterAdd extends Verb {
   @Parameters(paramLabel = "METER", description = "its number")
   private String code = "";

@@ -10,7 +10,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "scrap",
     description = "Say that a piece is gone.",
-    footer = {"", "Example:", "  lodebook piece scrap L-2404/0017 --why \"broke while being placed\""})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook piece scrap L-2404/0017 --why \"broke while being placed\""
+    })
 final class PieceScrap extends Verb {
   @Parameters(paramLabel = "PIECE", description = "the piece, such as L-2404/0017")
   private String piece = "";

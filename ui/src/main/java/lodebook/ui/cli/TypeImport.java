@@ -27,7 +27,8 @@ final class TypeImport extends FileVerb {
   int takeIn() {
     Rows<MagnetType> rows = TypeFile.read(session.source(need(file, "FILE")));
     importing(
-        rows, () -> session.change(book -> new MagnetTypes(book).importTypes(session.act(), rows.all())));
+        rows,
+        () -> session.change(book -> new MagnetTypes(book).importTypes(session.act(), rows.all())));
     session.done("type.imported", rows.count());
     session.next("lodebook lot import lots.csv");
     return 0;

@@ -47,8 +47,7 @@ final class TypeList extends Verb {
               + " x "
               + length
               + " mm";
-      case DISC ->
-          "dia " + diameter + " x " + Amounts.millimetres(type.thicknessMetres()) + " mm";
+      case DISC -> "dia " + diameter + " x " + Amounts.millimetres(type.thicknessMetres()) + " mm";
       case ROD -> "dia " + diameter + " x " + length + " mm";
       case ARC ->
           "dia "

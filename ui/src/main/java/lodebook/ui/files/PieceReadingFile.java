@@ -50,7 +50,9 @@ public final class PieceReadingFile {
     if (standoff > FARTHEST_MILLIMETRES) {
       cells.problem("standoff_mm", "piece.far", cells.raw("standoff_mm"));
     }
-    checkCell(cells, piece);
+    if (piece > 0) {
+      checkCell(cells, piece);
+    }
     if (!again) {
       rows.check(
           cells,

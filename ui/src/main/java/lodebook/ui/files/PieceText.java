@@ -33,11 +33,11 @@ final class PieceText {
     return piece == null ? STAND_IN : piece;
   }
 
-  /// Reads the number of a piece of one lot, written alone or as `LOT/NUMBER`.
+  /// Reads the number of a piece of one lot, written alone or as `LOT/NUMBER`; 0 as stand-in.
   static long numberIn(Cells cells, String column, String lot) {
     String text = cells.text(column);
     if (text.isEmpty()) {
-      return 1;
+      return 0;
     }
     if (NUMBER.matcher(text).matches() && Integer.parseInt(text) > 0) {
       return Integer.parseInt(text);
@@ -45,7 +45,7 @@ final class PieceText {
     PieceName piece = parse(text);
     if (piece == null) {
       cells.problem(column, "cell.not-piece-of", column, text, lot);
-      return 1;
+      return 0;
     }
     if (!piece.lot().equalsIgnoreCase(lot)) {
       cells.problem(column, "cell.other-lot", text, lot);

@@ -67,7 +67,7 @@ class CellsTest {
     check(
         "piece",
         "1,C,1,325,9,mT,1,20\n2,C,2,\"325,9\",mT,1,20\n",
-        "a.csv:2:20: the row has 8 fields, expected 7 as in the header row (a decimal comma between"
+        "a.csv:2:18: the row has 8 fields, expected 7 as in the header row (a decimal comma between"
             + " commas? write a point)",
         "a.csv:3:7: value is \"325,9\", expected a decimal point where commas separate: 325.9");
   }
@@ -81,9 +81,9 @@ class CellsTest {
         "a.csv:2:17: a block has no diameter_mm but 4 is given, expected an empty field",
         "a.csv:3:1: type B-1 stands here again after line 2, expected it once",
         "a.csv:3:5: shape is \"cube\", expected one of arc, block, disc, rod",
-        "a.csv:4:15: the inner diameter is 30 mm, expected less than the outer one (20 mm)",
-        "a.csv:4:18: the segment spans 400 degrees, expected less than 360",
-        "a.csv:4:26: tolerance_mm is -1, expected 0 or more");
+        "a.csv:4:17: the inner diameter is 30 mm, expected less than the outer one (20 mm)",
+        "a.csv:4:20: the segment spans 400 degrees, expected less than 360",
+        "a.csv:4:28: tolerance_mm is -1, expected 0 or more");
   }
 
   @Test

@@ -183,7 +183,7 @@ class CsvFormTest {
             MoveFile::read));
     assertEquals(
         List.of(
-            "a.csv:2:15: text follows a closing quote, expected a separator or the end of the row"
+            "a.csv:2:14: text follows a closing quote, expected a separator or the end of the row"
                 + " (a quote inside a quoted field is written twice)"),
         bench.problems(
             bench.file("a.csv", "piece,tray,cell\nL-1/1,T-1,\"4\" left\n"), MoveFile::read));

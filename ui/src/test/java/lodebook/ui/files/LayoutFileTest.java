@@ -94,18 +94,18 @@ class LayoutFileTest {
     assertEquals(
         List.of(
             "l.json:1:1: key probe is missing, expected an object",
-            "l.json:2:51: polePairs is 3.5, expected a whole number",
-            "l.json:2:79: segmentsPerPolePair is 7, expected 2, 3, 4, 5, 6 or 8",
+            "l.json:2:54: polePairs is 3.5, expected a whole number",
+            "l.json:2:82: segmentsPerPolePair is 7, expected 2, 3, 4, 5, 6 or 8",
             "l.json:3:12: focus is \"outside\", expected one of in, out",
             "l.json:7:3: key prob is not known, expected probe (the nearest known key)",
-            "l.json:10:55: bodyTurns is \"no\", expected true or false"),
+            "l.json:10:53: bodyTurns is \"no\", expected true or false"),
         bench.problems(bench.file("l.json", text), LayoutFile::read));
   }
 
   @Test
   void keysTwiceOrUnknownInside() {
     assertEquals(
-        List.of("l.json:2:25: key layout stands here for the second time, expected it once"),
+        List.of("l.json:2:24: key layout stands here for the second time, expected it once"),
         layout("\"revision\"", "\"layout\": \"X-1\", \"revision\""));
     assertEquals(
         List.of(
@@ -134,7 +134,7 @@ class LayoutFileTest {
         List.of("l.json:8:23: spots is [], expected at least one"), layout("[\"centre\"]", "[]"));
     assertEquals(
         List.of(
-            "l.json:8:51: components is \"radial \", expected one of radial, tangential (nearest:"
+            "l.json:8:50: components is \"radial \", expected one of radial, tangential (nearest:"
                 + " radial)"),
         layout("[\"radial\",", "[\"radial \","));
   }
@@ -144,7 +144,8 @@ class LayoutFileTest {
     assertEquals(
         List.of(
             "l.json:1:12: this is not proper JSON (Unexpected character (',' (code 44)): expected a"
-                + " value), expected a JSON value as RFC 8259 has it"),
+                + " valid value (JSON String, Number, Array, Object or token 'null', 'true' or"
+                + " 'false')), expected a JSON value as RFC 8259 has it"),
         bench.problems(bench.file("l.json", "{\"layout\": ,}"), LayoutFile::read));
     assertEquals(
         List.of(
@@ -168,7 +169,7 @@ class LayoutFileTest {
         GEAR.replace("STIR-IN@A", "STIR-IN").replace("\"held\": \"outer\"", "\"held\": \"ring\"");
     assertEquals(
         List.of(
-            "g.json:1:45: inner is \"STIR-IN\", expected a layout with its revision, CODE@REVISION",
+            "g.json:1:44: inner is \"STIR-IN\", expected a layout with its revision, CODE@REVISION",
             "g.json:2:33: held is \"ring\", expected one of inner, modulator, outer"),
         bench.problems(bench.file("g.json", wrong), GearFile::read));
   }
