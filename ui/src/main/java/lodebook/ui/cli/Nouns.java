@@ -9,13 +9,16 @@ final class Nouns {
   /// The nouns.
   static List<Noun> all() {
     return List.of(
+        new Noun("book", s -> List.of(new BookCreate(s), new BookShow(s), new BookSetting(s))),
         new Noun("person", Nouns::person),
         new Noun("meter", s -> List.of(new MeterAdd(s), new MeterList(s))),
         new Noun("grade", s -> List.of(new GradeImport(s), new GradeList(s))),
         new Noun("type", s -> List.of(new TypeImport(s), new TypeList(s))),
         new Noun("lot", Nouns::lot),
         new Noun("piece", Nouns::piece),
-        new Noun("tray", s -> List.of(new TrayShow(s), new TrayMove(s), new TrayUnsure(s))));
+        new Noun("tray", s -> List.of(new TrayShow(s), new TrayMove(s), new TrayUnsure(s))),
+        new Noun("layout", Nouns::layout),
+        new Noun("rotor", Nouns::rotor));
   }
 
   private static List<Verb> person(Session s) {
@@ -44,8 +47,21 @@ final class Nouns {
         new PieceScrap(s));
   }
 
+  private static List<Verb> layout(Session s) {
+    return List.of(
+        new LayoutTakeIn(s), new LayoutList(s), new LayoutShow(s), new LayoutRelease(s));
+  }
+
+  private static List<Verb> rotor(Session s) {
+    return List.of(new RotorOpen(s), new RotorList(s), new RotorShow(s), new RotorScrap(s));
+  }
+
   /// The commands that are one word.
   static List<Verb> alone(Session session) {
-    return List.of(new CompletionCommand(session), new HelpCommand(session));
+    return List.of(
+        new PlaceCommand(session),
+        new HistoryCommand(session),
+        new CompletionCommand(session),
+        new HelpCommand(session));
   }
 }
