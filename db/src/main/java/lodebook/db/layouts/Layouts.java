@@ -40,6 +40,16 @@ public final class Layouts {
         act, Permission.DESIGN, "layout import", writing -> importInto(writing, layout));
   }
 
+  /// Takes in several revisions as [#importDraft(Act, Layout)] does, all or none.
+  public List<LayoutRevision> importDrafts(Act act, List<Layout> layouts) {
+    layouts.forEach(l -> RevisionName.checkRevision(l.code(), l.revision()));
+    return book.write(
+        act,
+        Permission.DESIGN,
+        "layout import",
+        writing -> layouts.stream().map(l -> importInto(writing, l)).toList());
+  }
+
   private static LayoutRevision importInto(Writing writing, Layout layout) {
     DSLContext sql = writing.sql();
     long typeId = TypesOfLayouts.id(sql, layout.name(), layout.magnetType());

@@ -12,7 +12,7 @@ final class Common {
       scope = ScopeType.INHERIT,
       description =
           "the book: a folder or a jdbc:postgresql: address (else LODEBOOK_BOOK, else a folder in"
-              + " the user''s data directory)")
+              + " the user's data directory)")
   @Nullable String book;
 
   @Option(

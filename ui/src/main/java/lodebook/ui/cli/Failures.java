@@ -17,6 +17,7 @@ import java.util.Locale;
 import lodebook.db.refusal.Refusal;
 import lodebook.ui.files.BadFile;
 import lodebook.ui.files.Problem;
+import org.jspecify.annotations.Nullable;
 
 /// Turns every failure of a command into a sentence and an exit code; the only place that does.
 final class Failures {
@@ -36,11 +37,12 @@ final class Failures {
   int handle(Throwable failure) {
     PrintStream err = session.around().err();
     return switch (failure) {
-      case BadFile bad -> file(bad.problems(), bad.more(), WRONG_INPUT);
-      case FileRefused refused -> file(refused.problems(), refused.more(), refused.exitCode());
+      case BadFile bad -> file(bad.problems(), bad.more(), null, WRONG_INPUT);
+      case FileRefused refused ->
+          file(refused.problems(), refused.more(), refused.remedy(), refused.exitCode());
       case Refusal refusal -> {
         err.println("lodebook: " + session.sentences().say(refusal));
-        sayRemedy(err, refusal);
+        sayRemedy(err, refusal.remedy());
         yield refusal.kind().exitCode();
       }
       case CannotWrite cannot -> {
@@ -52,18 +54,18 @@ final class Failures {
     };
   }
 
-  private int file(List<Problem> problems, int more, int exitCode) {
+  private int file(List<Problem> problems, int more, @Nullable String remedy, int exitCode) {
     PrintStream err = session.around().err();
     problems.forEach(err::println);
     if (more > 0) {
       err.println(session.words().say("file.more", more));
     }
     err.println(session.words().say("file.nothing-changed"));
+    sayRemedy(err, remedy);
     return exitCode;
   }
 
-  private void sayRemedy(PrintStream err, Refusal refusal) {
-    String remedy = refusal.remedy();
+  private void sayRemedy(PrintStream err, @Nullable String remedy) {
     if (remedy != null) {
       err.println(session.words().say("try", remedy));
     }

@@ -6,7 +6,7 @@ import lodebook.db.refusal.RowsRefused;
 import lodebook.ui.files.BadFile;
 import lodebook.ui.files.Problem;
 import lodebook.ui.files.Rows;
-import lodebook.ui.words.Words;
+import org.jspecify.annotations.Nullable;
 
 /// The book refuses rows of a file: the same list of places as for a file that is wrong in itself.
 final class FileRefused extends RuntimeException {
@@ -14,31 +14,43 @@ final class FileRefused extends RuntimeException {
 
   private final transient List<Problem> problems;
   private final int more;
+  private final @Nullable String remedy;
   private final int exitCode;
 
-  private FileRefused(List<Problem> problems, int more, RowsRefused cause) {
+  private FileRefused(
+      List<Problem> problems, int more, @Nullable String remedy, RowsRefused cause) {
     super(cause);
     this.problems = problems;
     this.more = more;
+    this.remedy = remedy;
     this.exitCode = cause.kind().exitCode();
   }
 
   /// The refusal with the places of its rows.
   static FileRefused of(RowsRefused refused, Rows<?> rows, Session session) {
     List<RowProblem> all = refused.problems();
+    List<String> remedies =
+        all.stream().map(p -> String.valueOf(p.refusal().remedy())).distinct().toList();
+    String common = remedies.size() == 1 ? all.getFirst().refusal().remedy() : null;
     List<Rows.RowFault> faults =
         all.stream()
             .limit(BadFile.SHOWN)
-            .map(p -> new Rows.RowFault(p.row(), p.column(), sentence(p, session)))
+            .map(p -> new Rows.RowFault(p.row(), p.column(), sentence(p, common, session)))
             .toList();
-    return new FileRefused(rows.problems(faults), all.size() - faults.size(), refused);
+    return new FileRefused(rows.problems(faults), all.size() - faults.size(), common, refused);
   }
 
-  private static String sentence(RowProblem problem, Session session) {
+  private static String sentence(RowProblem problem, @Nullable String common, Session session) {
     String sentence = session.sentences().say(problem.refusal());
     String remedy = problem.refusal().remedy();
-    Words words = session.words();
-    return remedy == null ? sentence : words.say("row.remedy", sentence, remedy);
+    return remedy == null || remedy.equals(common)
+        ? sentence
+        : session.words().say("row.remedy", sentence, remedy);
+  }
+
+  /// The command that helps with every row, or null where there is no such.
+  @Nullable String remedy() {
+    return remedy;
   }
 
   List<Problem> problems() {

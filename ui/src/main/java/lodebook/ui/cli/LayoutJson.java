@@ -47,7 +47,6 @@ final class LayoutJson {
         .put("insertFrom", layout.insertFrom().name().toLowerCase(Locale.ROOT))
         .put(
             "tolerance",
-            Json.object()
-                .put("workingAmplitudePercent", layout.workingAmplitudeTolerance() * 100));
+            Json.object().put("workingAmplitudePercent", layout.workingAmplitudeTolerance() * 100));
   }
 }

@@ -20,8 +20,7 @@ final class LayoutRelease extends Verb {
 
   @Override
   int run() {
-    LayoutRevision released =
-        session.write(book -> new Layouts(book).release(session.act(), name));
+    LayoutRevision released = session.write(book -> new Layouts(book).release(session.act(), name));
     session.done("layout.released", LayoutShow.shown(released.layout()));
     session.next("lodebook rotor open " + released.layout().code() + " --serial R-0001");
     return 0;

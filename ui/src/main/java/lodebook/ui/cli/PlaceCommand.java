@@ -50,9 +50,7 @@ final class PlaceCommand extends FileVerb {
     }
     String reason = correct || rework || deviation ? need(why, "--why") : "";
     PlaceHow.Change change =
-        correct
-            ? PlaceHow.Change.CORRECT
-            : rework ? PlaceHow.Change.REWORK : PlaceHow.Change.NONE;
+        correct ? PlaceHow.Change.CORRECT : rework ? PlaceHow.Change.REWORK : PlaceHow.Change.NONE;
     Rows<PlaceRow> rows = PlacementFile.read(session.source(path));
     importing(
         rows,

@@ -149,7 +149,7 @@ class LayoutFileTest {
         bench.problems(bench.file("l.json", "{\"layout\": ,}"), LayoutFile::read));
     assertEquals(
         List.of(
-            "l.json:11:1: this is not proper JSON (text follows its end), expected a JSON value as"
+            "l.json:12:1: this is not proper JSON (text follows its end), expected a JSON value as"
                 + " RFC 8259 has it"),
         bench.problems(bench.file("l.json", LAYOUT + "{}"), LayoutFile::read));
     assertEquals(

@@ -1,0 +1,89 @@
+package lodebook.ui.cli;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
+import java.nio.file.Path;
+import java.util.Arrays;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/// The examples of all files, imported in the order of a day into a new book.
+class FirstDayTest {
+  @TempDir Path folder;
+
+  @Test
+  void examplesImportInTheOrderOfTheDay() {
+    Shop shop = new Shop(folder);
+    said(shop, "a new book is at lodebook/book\n", "book", "create");
+    said(
+        shop,
+        "AB (A. Baker) signs from now on as lead\n",
+        "person",
+        "add",
+        "AB",
+        "--name",
+        "A. Baker");
+    shop.with("LODEBOOK_BY", "ab");
+    said(
+        shop,
+        "meter GM-1 is in the book, calibrated until 2027-06-30\n",
+        "meter",
+        "add",
+        "GM-1",
+        "--accuracy-percent",
+        "1",
+        "--calibration-due",
+        "2027-06-30");
+    takeIn(shop, "grades taken in: 1\n", "grades.csv", "grade", "import");
+    takeIn(shop, "magnet types taken in: 2\n", "types.csv", "type", "import");
+    takeIn(shop, "lots received, awaiting inspection: 2\n", "lots.csv", "lot", "import");
+    takeIn(
+        shop,
+        "readings taken in: 26, of 26 pieces (26 new)\n",
+        "r.csv",
+        "piece",
+        "import",
+        "L-2404");
+    takeIn(shop, "pieces laid into their new cells: 2\n", "moves.csv", "tray", "move");
+    said(
+        shop,
+        "lot L-2404 is accepted: its pieces can be planned and placed\n",
+        "lot",
+        "accept",
+        "L-2404",
+        "--why",
+        "fine");
+    takeIn(
+        shop, "STIR-IN rev A, STIR-OUT rev A taken in as a draft\n", "l.json", "layout", "import");
+    said(
+        shop,
+        "STIR-IN rev A is released and never changes from now on\n",
+        "layout",
+        "release",
+        "STIR-IN");
+    said(
+        shop,
+        "rotor R-0001 is open, to be built to STIR-IN@A with 12 magnets\n",
+        "rotor",
+        "open",
+        "STIR-IN",
+        "--serial",
+        "R-0001");
+    takeIn(shop, "rotor R-0001: slots recorded 12, filled 12 of 12\n", "p.csv", "place", "R-0001");
+  }
+
+  private static void said(Shop shop, String expected, String... command) {
+    assertEquals(expected, shop.does(command));
+  }
+
+  private void takeIn(Shop shop, String expected, String name, String... command) {
+    String path = folder.resolve(name).toString();
+    String[] example = Arrays.copyOf(command, command.length + 2);
+    example[command.length] = "--example";
+    example[command.length + 1] = path;
+    said(shop, "an example is in " + name + "\n", example);
+    String[] real = Arrays.copyOf(command, command.length + 1);
+    real[command.length] = path;
+    said(shop, expected, real);
+  }
+}
