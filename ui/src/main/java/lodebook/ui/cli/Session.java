@@ -2,15 +2,20 @@ package lodebook.ui.cli;
 
 import java.nio.file.Path;
 import java.time.Instant;
+import java.time.OffsetDateTime;
 import java.time.ZoneId;
+import java.time.temporal.ChronoUnit;
 import java.util.function.Consumer;
 import java.util.function.Function;
 import lodebook.db.book.Act;
 import lodebook.db.book.Book;
 import lodebook.db.book.BookAddress;
 import lodebook.db.book.Visit;
+import lodebook.db.keep.BookInfo;
 import lodebook.db.refusal.Sentences;
+import lodebook.reports.sheet.PaperSize;
 import lodebook.ui.files.Source;
+import lodebook.ui.paper.Facts;
 import lodebook.ui.words.Words;
 import org.jspecify.annotations.Nullable;
 
@@ -120,6 +125,17 @@ final class Session {
     if (!address.equals(new BookAddress.Folder(around.defaultBook()))) {
       remark(words.say("book.used", address.shown()));
     }
+  }
+
+  /// What sheets say about themselves.
+  Facts facts(Book book) {
+    String by = act().by();
+    return new Facts(
+        BookInfo.of(book),
+        by == null ? "-" : by,
+        OffsetDateTime.now(around.clock()).truncatedTo(ChronoUnit.SECONDS),
+        PaperSize.A4,
+        words.locale());
   }
 
   /// A file that a person named.
