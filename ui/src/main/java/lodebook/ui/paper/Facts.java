@@ -14,11 +14,7 @@ import lodebook.reports.sheet.SheetFacts;
 /// @param paper size of the paper
 /// @param language language of the sheet
 public record Facts(
-    BookInfo info,
-    String printedBy,
-    OffsetDateTime printedAt,
-    PaperSize paper,
-    Locale language) {
+    BookInfo info, String printedBy, OffsetDateTime printedAt, PaperSize paper, Locale language) {
   /// The facts of one sheet.
   ///
   /// @param code the number of what it is about

@@ -115,7 +115,9 @@ class CommandLineTest {
   void noBook() {
     assertEquals(
         new Shop.Said(
-            5, "", "lodebook: there is no book at lodebook/book\ntry: lodebook book create --book lodebook/book\n"),
+            5,
+            "",
+            "lodebook: there is no book at lodebook/book\ntry: lodebook book create --book lodebook/book\n"),
         new Shop(folder).run("lot", "list"));
   }
 
