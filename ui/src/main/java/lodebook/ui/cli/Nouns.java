@@ -18,7 +18,8 @@ final class Nouns {
         new Noun("piece", Nouns::piece),
         new Noun("tray", s -> List.of(new TrayShow(s), new TrayMove(s), new TrayUnsure(s))),
         new Noun("layout", Nouns::layout),
-        new Noun("rotor", Nouns::rotor));
+        new Noun("rotor", Nouns::rotor),
+        new Noun("survey", Nouns::survey));
   }
 
   private static List<Verb> person(Session s) {
@@ -53,6 +54,10 @@ final class Nouns {
 
   private static List<Verb> rotor(Session s) {
     return List.of(new RotorOpen(s), new RotorList(s), new RotorShow(s), new RotorScrap(s));
+  }
+
+  private static List<Verb> survey(Session s) {
+    return List.of(new SurveyTakeIn(s), new SurveyCheck(s), new SurveyVoid(s), new SurveyMove(s));
   }
 
   /// The commands that are one word.

@@ -83,6 +83,11 @@ final class Session {
     return new Act(common.by == null ? around.variable("LODEBOOK_BY") : common.by, at);
   }
 
+  /// Opens the book for a command that must close it while it computes.
+  Book opened() {
+    return Book.open(address(), visit());
+  }
+
   /// Asks the book something.
   <T> T read(Function<Book, T> question) {
     try (Book book = Book.open(address(), visit())) {

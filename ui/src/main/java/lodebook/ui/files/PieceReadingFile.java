@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import lodebook.db.stock.ReadingRow;
+import lodebook.db.surveys.FluxUnit;
 import org.jspecify.annotations.Nullable;
 
 /// Reads gaussmeter readings of single pieces.
@@ -45,7 +46,7 @@ public final class PieceReadingFile {
     } else if (value == 0) {
       cells.problem("value", "piece.zero");
     }
-    Flux unit = Flux.of(cells);
+    FluxUnit unit = Units.of(cells);
     double standoff = cells.notNegative("standoff_mm");
     if (standoff > FARTHEST_MILLIMETRES) {
       cells.problem("standoff_mm", "piece.far", cells.raw("standoff_mm"));

@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.TreeMap;
 import lodebook.assembly.layout.Component;
 import lodebook.assembly.layout.Spot;
+import lodebook.db.surveys.SurveyRow;
 import org.jspecify.annotations.Nullable;
 
 /// Reads surveys.
@@ -42,7 +43,7 @@ public final class SurveyFile {
         cells.oneOf("spot", SPOTS, Spot.CENTRE),
         cells.oneOf("component", COMPONENTS, Component.RADIAL),
         cells.number("value"),
-        Flux.of(cells),
+        Units.of(cells),
         cells.celsiusOrNull("temperature_C"),
         radius(cells),
         metres(cells.numberOrNull("height_mm")),
