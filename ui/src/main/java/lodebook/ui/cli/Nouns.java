@@ -9,7 +9,7 @@ final class Nouns {
   /// The nouns.
   static List<Noun> all() {
     return List.of(
-        new Noun("book", s -> List.of(new BookCreate(s), new BookShow(s), new BookSetting(s))),
+        new Noun("book", Nouns::book),
         new Noun("person", Nouns::person),
         new Noun("meter", s -> List.of(new MeterAdd(s), new MeterList(s))),
         new Noun("grade", s -> List.of(new GradeImport(s), new GradeList(s))),
@@ -20,6 +20,18 @@ final class Nouns {
         new Noun("layout", Nouns::layout),
         new Noun("rotor", Nouns::rotor),
         new Noun("survey", Nouns::survey));
+  }
+
+  private static List<Verb> book(Session s) {
+    return List.of(
+        new BookCreate(s),
+        new BookShow(s),
+        new BookVerify(s),
+        new BookUpgrade(s),
+        new BookBackup(s),
+        new BookRestore(s),
+        new BookExport(s),
+        new BookSetting(s));
   }
 
   private static List<Verb> person(Session s) {

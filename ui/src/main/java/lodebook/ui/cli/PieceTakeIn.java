@@ -4,7 +4,6 @@ import java.nio.file.Path;
 import lodebook.db.stock.ImportedReadings;
 import lodebook.db.stock.PieceImport;
 import lodebook.db.stock.ReadingRow;
-import lodebook.ui.craft.ReadingEstimate;
 import lodebook.ui.files.Example;
 import lodebook.ui.files.PieceReadingFile;
 import lodebook.ui.files.Rows;
@@ -49,7 +48,7 @@ final class PieceTakeIn extends FileVerb {
             session.change(
                 book ->
                     tell(
-                        new PieceImport(book, new ReadingEstimate())
+                        new PieceImport(book)
                             .importReadings(session.act(), of, rows.all(), reason))));
     session.next("lodebook lot accept " + of + " --why TEXT");
     return 0;
