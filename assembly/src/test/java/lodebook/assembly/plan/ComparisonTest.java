@@ -13,8 +13,8 @@ import lodebook.assembly.layout.Focus;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.RingDesign;
-import lodebook.assembly.layout.RingHarmonics;
 import lodebook.assembly.layout.RingPolarisation;
+import lodebook.assembly.layout.WorkingCircle;
 import lodebook.assembly.magnet.MagnetType;
 import org.junit.jupiter.api.Test;
 
@@ -99,9 +99,11 @@ class ComparisonTest {
     MutualMagnetisation mutual = MutualMagnetisation.of(design);
     RingPolarisation actual = mutual.answerTo(RingPolarisation.of(strength, design.ruleFacings()));
     RingPolarisation equal = mutual.answerTo(RingPolarisation.of(mean, design.ruleFacings()));
-    RingHarmonics ring = new RingHarmonics(design);
+    WorkingCircle ring = new WorkingCircle(design);
     assertEquals(
-        ring.unwanted(actual, equal), plan.unwantedHarmonics(), 1e-9 * plan.unwantedHarmonics());
+        ring.unwantedHarmonics(actual, equal),
+        plan.unwantedHarmonics(),
+        1e-9 * plan.unwantedHarmonics());
     assertEquals(ring.workingAmplitude(actual), plan.workingAmplitudeTesla(), 1e-12);
     double rigid =
         RotorPlanner.of(Examples.design(layout), task)
