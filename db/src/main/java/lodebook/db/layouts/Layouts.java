@@ -75,6 +75,7 @@ public final class Layouts {
     }
     row.store();
     LayoutRevision after = byId(sql, row.getId());
+    refuseFaults(sql, after);
     LayoutLines.write(writing.line(), after.layout());
     return after;
   }
@@ -133,6 +134,7 @@ public final class Layouts {
       throw Refusal.refused("layout.released-already", draft.layout().name())
           .remedy("lodebook layout show " + draft.layout().name());
     }
+    refuseFaults(sql, draft);
     LayoutReleaseRecord release = sql.newRecord(LAYOUT_RELEASE);
     release.from(sql.fetchSingle(LAYOUT_REVISION, LAYOUT_REVISION.ID.eq(draft.id())));
     release.setReleasedBy(writing.person().id());
@@ -143,6 +145,13 @@ public final class Layouts {
     writing.line().field("layout", draft.layout().name());
     writing.line().now("layout", draft.layout().name(), "released");
     return byId(sql, draft.id());
+  }
+
+  private static void refuseFaults(DSLContext sql, LayoutRevision revision) {
+    List<String> faults = design(sql, revision).faults();
+    if (!faults.isEmpty()) {
+      throw Refusal.wrongInput("layout.faults", String.join("\n", faults));
+    }
   }
 
   private static LayoutRevision onlyDraft(DSLContext sql, String code) {
