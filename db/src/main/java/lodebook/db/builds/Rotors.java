@@ -145,7 +145,7 @@ public final class Rotors {
   }
 
   /// Refuses a rotor at which nobody can build: scrapped, held, or in a unit.
-  static void requireOpen(Rotor rotor) {
+  public static void requireOpen(Rotor rotor) {
     if (!rotor.state().equals("open")) {
       throw Refusal.refused("rotor." + rotor.state(), rotor.code())
           .remedy("lodebook rotor show " + rotor.code());

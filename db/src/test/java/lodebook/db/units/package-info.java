@@ -1,0 +1,4 @@
+@NullMarked
+package lodebook.db.units;
+
+import org.jspecify.annotations.NullMarked;
