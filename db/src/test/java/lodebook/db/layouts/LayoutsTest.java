@@ -48,7 +48,7 @@ class LayoutsTest {
           "BLK-5",
           17.3e-3,
           new Probe(
-              17.9e-3, -1.5e-3, List.of(Spot.TO_NEXT, Spot.CENTRE), List.of(Component.TANGENTIAL)),
+              17.5e-3, -1.5e-3, List.of(Spot.TO_NEXT, Spot.CENTRE), List.of(Component.TANGENTIAL)),
           new Spread(0.01e-3, 0.7, 0.2e-3, 1.3),
           "",
           null,
