@@ -45,6 +45,9 @@ class GrowthTest {
     }
     long grown = Files.size(place.file());
     long compacted = compacted(place);
+    Files.writeString(
+        Path.of("target", "growth-" + operations + ".txt"),
+        "%d operations: %d bytes, compacted %d%n".formatted(operations, grown, compacted));
     assertTrue(
         grown <= 3 * compacted + retained,
         () -> "%d operations: %d bytes, %d compacted".formatted(operations, grown, compacted));
