@@ -18,18 +18,18 @@ import org.junit.jupiter.api.Test;
 /// How the embedded file grows when it is opened for each operation and closed again.
 class GrowthTest {
   @Test
-  void aThousandOperationsStayBelowThriceTheCompactedFile() throws Exception {
-    assertGrowth(1_000, 64_000_000);
+  void aThousandOperationsAddNoMoreThanSpaceNotYetUsedAgain() throws Exception {
+    assertGrowth(1_000, 32_000_000);
   }
 
   @Test
   @Tag("slow")
-  void tenThousandOperationsStayBelowThriceTheCompactedFile() throws Exception {
+  void tenThousandOperationsAddNoMoreThanSpaceNotYetUsedAgain() throws Exception {
     assertGrowth(10_000, 64_000_000);
   }
 
-  /// The engine reuses space only when it is older than its retention time, so a file written in
-  /// one go may carry that much more.
+  /// The engine uses space again only when it is older than its retention time, so a file written
+  /// in one go carries that much more: 26 kB for each operation were measured, about 64 MB at most.
   private static void assertGrowth(int operations, long retained) throws SQLException, IOException {
     BookAddress.Folder place = (BookAddress.Folder) TestBook.EMBEDDED.newShop();
     Visit visit = TestBook.visit();
