@@ -62,6 +62,7 @@ public final class Workshop implements AutoCloseable {
     for (Map.Entry<String, String> person :
         Map.of("LE", "lead", "BE", "bench", "BO", "bench", "PL", "planner", "IN", "inspector")
             .entrySet()) {
+      writing.line().now("person", person.getKey(), person.getValue());
       writing
           .sql()
           .insertInto(PERSON)
@@ -156,6 +157,7 @@ public final class Workshop implements AutoCloseable {
         .set(LOT.RECORDED_AT, writing.recordedAt())
         .set(LOT.HISTORY_SEQUENCE, writing.sequence())
         .execute();
+    writing.line().now("lot", code, "accepted");
     long tray = writing.register(trayCode, CodeKind.TRAY);
     writing
         .sql()

@@ -33,6 +33,7 @@ import lodebook.db.builds.PlannedSlot;
 import lodebook.db.builds.Plans;
 import lodebook.db.builds.Rotor;
 import lodebook.db.builds.Rotors;
+import lodebook.db.keep.Verification;
 import lodebook.db.layouts.GearDraft;
 import lodebook.db.layouts.Gears;
 import lodebook.db.layouts.Layouts;
@@ -288,6 +289,15 @@ class GearDayTest {
           "lodebook unit show U-1",
           () -> units.takeBack(BENCH, "U-1", "again"));
       traced(new Traces(book));
+      new Rotors(book).open(BENCH, "IN", "R-3");
+      new Placements(book)
+          .place(
+              BENCH,
+              "R-3",
+              List.of(new PlaceRow(1, "L-1/30", 0), new PlaceRow(2, "L-1", 270.5)),
+              PlaceHow.PLAIN);
+      new Rotors(book).scrap(LEAD, "R-3", "cracked");
+      assertEquals(List.of(), Verification.of(book, null).faults());
     }
   }
 
