@@ -3,6 +3,8 @@ package lodebook.ui.files;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
+import lodebook.assembly.layout.Member;
+import lodebook.db.layouts.GearDraft;
 import org.jspecify.annotations.Nullable;
 
 /// Reads the model of a gear.
@@ -19,25 +21,26 @@ public final class GearFile {
           "modulatorOuterRadiusMillimetres",
           "stackMillimetres",
           "requiredPullOutMilliNewtonMetres");
-  private static final Map<String, String> MEMBERS =
-      new TreeMap<>(Map.of("outer", "outer", "modulator", "modulator", "inner", "inner"));
+  private static final Map<String, Member> MEMBERS =
+      new TreeMap<>(
+          Map.of("outer", Member.OUTER, "modulator", Member.MODULATOR, "inner", Member.INNER));
 
   private GearFile() {}
 
   /// The gear model of a file. Whether its pieces fit its layouts' pole pairs, only the book knows.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static GearRow read(Source source) {
+  public static GearDraft read(Source source) {
     JsonProblems problems = new JsonProblems(source);
     JsonFields file =
         JsonFields.of(
             problems, JsonText.read(source, problems), source.words().say("json.the-file"), KEYS);
-    GearRow gear = gear(file);
+    GearDraft gear = gear(file);
     problems.throwIfAny();
     return gear;
   }
 
-  private static GearRow gear(JsonFields file) {
+  private static GearDraft gear(JsonFields file) {
     Double inside = positiveOrNull(file, "modulatorInnerRadiusMillimetres");
     Double outside = positiveOrNull(file, "modulatorOuterRadiusMillimetres");
     if (inside != null && outside != null && outside <= inside) {
@@ -48,13 +51,13 @@ public final class GearFile {
           file.shown("modulatorOuterRadiusMillimetres"),
           file.say("json.above-inner", file.shown("modulatorInnerRadiusMillimetres")));
     }
-    return new GearRow(
+    return new GearDraft(
         file.text("gear", Numbers::isCode, "json.code"),
         file.text("revision", Numbers::isRevision, "json.revision"),
         file.text("inner", Numbers::isLayoutName, "json.layout-name"),
         file.text("outer", Numbers::isLayoutName, "json.layout-name"),
         file.whole("modulatorPieces", x -> x >= 1, "json.count"),
-        file.oneOf("held", MEMBERS, "outer"),
+        file.oneOf("held", MEMBERS, Member.OUTER),
         scaled(inside),
         scaled(outside),
         file.number("stackMillimetres", x -> x > 0, "json.positive") / 1000,

@@ -9,10 +9,12 @@ import lodebook.assembly.layout.Facing;
 import lodebook.assembly.layout.Focus;
 import lodebook.assembly.layout.InsertFrom;
 import lodebook.assembly.layout.Layout;
+import lodebook.assembly.layout.Member;
 import lodebook.assembly.layout.Numbering;
 import lodebook.assembly.layout.Probe;
 import lodebook.assembly.layout.Spot;
 import lodebook.assembly.layout.Spread;
+import lodebook.db.layouts.GearDraft;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -163,7 +165,8 @@ class LayoutFileTest {
   @Test
   void gear() {
     assertEquals(
-        new GearRow("STIR", "A", "STIR-IN@A", "STIR-OUT@A", 11, "outer", null, null, 0.01, null),
+        new GearDraft(
+            "STIR", "A", "STIR-IN@A", "STIR-OUT@A", 11, Member.OUTER, null, null, 0.01, null),
         GearFile.read(bench.file("g.json", GEAR)));
     String wrong =
         GEAR.replace("STIR-IN@A", "STIR-IN").replace("\"held\": \"outer\"", "\"held\": \"ring\"");

@@ -1,0 +1,93 @@
+package lodebook.ui.cli;
+
+import java.util.List;
+import lodebook.db.trace.Trace;
+import lodebook.db.trace.TraceNode;
+import lodebook.db.trace.Traces;
+import lodebook.ui.words.Amounts;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+
+/// Traces a number both ways.
+@Command(
+    name = "trace",
+    description = "Show what a number was made from and what it went into.",
+    footer = {"", "Example:", "  lodebook trace U-0001"})
+final class TraceCommand extends Verb {
+  @Parameters(
+      paramLabel = "CODE",
+      description = "any number the shop uses: lot, supplier's lot, piece, rotor, unit ...")
+  private String code = "";
+
+  TraceCommand(Session session) {
+    super(session);
+  }
+
+  @Override
+  int run() {
+    Trace trace = session.read(book -> new Traces(book).trace(code));
+    if (!session.json(json(trace))) {
+      session.say(text(trace));
+    }
+    return 0;
+  }
+
+  private String text(Trace trace) {
+    StringBuilder text = new StringBuilder();
+    text.append(trace.code()).append(" (").append(trace.kind());
+    text.append(trace.state().isEmpty() ? "" : ", " + trace.state()).append(")\n");
+    branch(text, "trace.made-from", trace.madeFrom());
+    branch(text, "trace.went-into", trace.wentInto());
+    branch(text, "trace.others", trace.others());
+    return text.toString().stripTrailing();
+  }
+
+  private void branch(StringBuilder text, String key, List<TraceNode> nodes) {
+    if (!nodes.isEmpty()) {
+      text.append(session.words().say(key)).append('\n');
+      lines(text, nodes, "  ");
+    }
+  }
+
+  private void lines(StringBuilder text, List<TraceNode> nodes, String indent) {
+    for (TraceNode node : nodes) {
+      text.append(indent).append(node.code()).append(" (").append(node.kind());
+      text.append(node.state().isEmpty() ? "" : ", " + node.state()).append(')');
+      if (node.from() != null) {
+        text.append(' ').append(Amounts.minute(node.from(), session.zone()));
+        text.append(node.to() == null ? "" : " to " + Amounts.minute(node.to(), session.zone()));
+      }
+      text.append('\n');
+      lines(text, node.branches(), indent + "  ");
+    }
+  }
+
+  private static Json json(Trace trace) {
+    Json document =
+        Json.object()
+            .put("code", trace.code())
+            .put("kind", trace.kind())
+            .put("at", trace.at())
+            .put("state", trace.state())
+            .put("madeFrom", nodes(trace.madeFrom(), "madeFrom"))
+            .put("wentInto", nodes(trace.wentInto(), "wentInto"));
+    return trace.others().isEmpty()
+        ? document
+        : document.put("others", nodes(trace.others(), "madeFrom"));
+  }
+
+  private static List<Json> nodes(List<TraceNode> nodes, String key) {
+    return nodes.stream()
+        .map(
+            n ->
+                Json.object()
+                    .put("code", n.code())
+                    .put("kind", n.kind())
+                    .put("at", n.at())
+                    .put("state", n.state())
+                    .putIfAny("from", n.from())
+                    .putIfAny("to", n.to())
+                    .put(key, nodes(n.branches(), key)))
+        .toList();
+  }
+}
