@@ -13,7 +13,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "open",
     description = "Open a batch of gears: its rotors get their numbers.",
-    footer = {"", "Example:", "  lodebook batch open B-31 --gear STIR --count 2 --serials 'R-{0001}'"})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook batch open B-31 --gear STIR --count 2 --serials 'R-{0001}'"
+    })
 final class BatchOpen extends Verb {
   @Parameters(paramLabel = "BATCH", description = "its number")
   private String code = "";

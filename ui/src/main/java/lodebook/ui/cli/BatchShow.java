@@ -30,7 +30,8 @@ final class BatchShow extends Verb {
               .row("serials", batch.serials())
               .row("opened", Amounts.minute(batch.openedAt(), session.zone()))
               .text());
-      Table table = new Table("ROTOR", ">GEAR", "RING", "STATE", ">FILLED", "PLAN", "SURVEY", "UNIT");
+      Table table =
+          new Table("ROTOR", ">GEAR", "RING", "STATE", ">FILLED", "PLAN", "SURVEY", "UNIT");
       batch
           .rotors()
           .forEach(

@@ -15,6 +15,7 @@ import java.util.HexFormat;
 import java.util.List;
 import java.util.Locale;
 import lodebook.db.refusal.Refusal;
+import lodebook.ui.craft.PiecesShort;
 import lodebook.ui.files.BadFile;
 import lodebook.ui.files.Problem;
 import org.jspecify.annotations.Nullable;
@@ -23,6 +24,7 @@ import org.jspecify.annotations.Nullable;
 final class Failures {
   static final int WRONG_LINE = 2;
   static final int WRONG_INPUT = 3;
+  static final int REFUSED = 4;
   static final int DEFECT = 70;
 
   private final Session session;
@@ -44,6 +46,24 @@ final class Failures {
         err.println("lodebook: " + session.sentences().say(refusal));
         sayRemedy(err, refusal.remedy());
         yield refusal.kind().exitCode();
+      }
+      case PiecesShort pieces -> {
+        pieces
+            .shortages()
+            .forEach(
+                s ->
+                    err.println(
+                        "lodebook: "
+                            + session
+                                .words()
+                                .say(
+                                    "plan.short",
+                                    s.type(),
+                                    s.missing(),
+                                    s.needed(),
+                                    s.available())));
+        sayRemedy(err, "lodebook lot list");
+        yield REFUSED;
       }
       case CannotWrite cannot -> {
         err.println(

@@ -77,8 +77,7 @@ final class GearShow extends Verb {
         .put("modulatorInnerRadiusMillimetres", thousand(model.modulatorInnerRadiusMetres()))
         .put("modulatorOuterRadiusMillimetres", thousand(model.modulatorOuterRadiusMetres()))
         .put("stackMillimetres", model.stackMetres() * 1000)
-        .put(
-            "requiredPullOutMilliNewtonMetres", thousand(model.requiredPullOutNewtonMetres()));
+        .put("requiredPullOutMilliNewtonMetres", thousand(model.requiredPullOutNewtonMetres()));
   }
 
   private static @Nullable Double thousand(@Nullable Double amount) {

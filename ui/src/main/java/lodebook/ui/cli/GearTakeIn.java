@@ -1,9 +1,9 @@
 package lodebook.ui.cli;
 
 import java.nio.file.Path;
+import lodebook.db.layouts.GearDraft;
 import lodebook.db.layouts.GearRevision;
 import lodebook.db.layouts.Gears;
-import lodebook.db.layouts.GearDraft;
 import lodebook.ui.files.Example;
 import lodebook.ui.files.GearFile;
 import org.jspecify.annotations.Nullable;

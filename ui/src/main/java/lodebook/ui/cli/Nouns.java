@@ -18,8 +18,14 @@ final class Nouns {
         new Noun("piece", Nouns::piece),
         new Noun("tray", s -> List.of(new TrayShow(s), new TrayMove(s), new TrayUnsure(s))),
         new Noun("layout", Nouns::layout),
+        new Noun(
+            "gear",
+            s -> List.of(new GearTakeIn(s), new GearList(s), new GearShow(s), new GearRelease(s))),
+        new Noun("batch", s -> List.of(new BatchOpen(s), new BatchList(s), new BatchShow(s))),
         new Noun("rotor", Nouns::rotor),
-        new Noun("survey", Nouns::survey));
+        new Noun("survey", Nouns::survey),
+        new Noun("unit", Nouns::unit),
+        new Noun("paper", s -> List.of(new PaperTraveller(s))));
   }
 
   private static List<Verb> book(Session s) {
@@ -72,10 +78,16 @@ final class Nouns {
     return List.of(new SurveyTakeIn(s), new SurveyCheck(s), new SurveyVoid(s), new SurveyMove(s));
   }
 
+  private static List<Verb> unit(Session s) {
+    return List.of(new UnitAssemble(s), new UnitReturn(s), new UnitList(s), new UnitShow(s));
+  }
+
   /// The commands that are one word.
   static List<Verb> alone(Session session) {
     return List.of(
+        new PlanCommand(session),
         new PlaceCommand(session),
+        new TraceCommand(session),
         new HistoryCommand(session),
         new CompletionCommand(session),
         new HelpCommand(session));

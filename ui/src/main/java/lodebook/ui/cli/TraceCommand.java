@@ -77,17 +77,19 @@ final class TraceCommand extends Verb {
   }
 
   private static List<Json> nodes(List<TraceNode> nodes, String key) {
-    return nodes.stream()
-        .map(
-            n ->
-                Json.object()
-                    .put("code", n.code())
-                    .put("kind", n.kind())
-                    .put("at", n.at())
-                    .put("state", n.state())
-                    .putIfAny("from", n.from())
-                    .putIfAny("to", n.to())
-                    .put(key, nodes(n.branches(), key)))
-        .toList();
+    return nodes.stream().map(n -> node(n, key)).toList();
+  }
+
+  private static Json node(TraceNode node, String key) {
+    Json json =
+        Json.object()
+            .put("code", node.code())
+            .put("kind", node.kind())
+            .put("at", node.at())
+            .put("state", node.state());
+    if (node.from() != null) {
+      json.put("from", node.from()).put("to", node.to());
+    }
+    return json.put(key, nodes(node.branches(), key));
   }
 }

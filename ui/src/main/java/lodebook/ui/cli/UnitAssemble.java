@@ -11,7 +11,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "assemble",
     description = "Assemble a gear from rotors whose latest survey passes.",
-    footer = {"", "Example:", "  lodebook unit assemble U-0001 --gear STIR --inner R-0001 --outer R-0002"})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook unit assemble U-0001 --gear STIR --inner R-0001 --outer R-0002"
+    })
 final class UnitAssemble extends Verb {
   @Parameters(paramLabel = "UNIT", description = "its number")
   private String code = "";

@@ -10,7 +10,11 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "return",
     description = "Record that a gear came back, and with which complaint.",
-    footer = {"", "Example:", "  lodebook unit return U-0001 --complaint \"slips at half the torque\""})
+    footer = {
+      "",
+      "Example:",
+      "  lodebook unit return U-0001 --complaint \"slips at half the torque\""
+    })
 final class UnitReturn extends Verb {
   @Parameters(paramLabel = "UNIT", description = "its number")
   private String code = "";

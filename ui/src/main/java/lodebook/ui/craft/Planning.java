@@ -93,8 +93,7 @@ public final class Planning {
     int slots = ring.design().slots();
     Double seconds = wish.seconds();
     Effort effort = seconds == null ? Effort.usual(slots) : Effort.seconds(slots, seconds);
-    return Map.of(
-        ring.rotor(), RotorPlanner.of(ring.design(), task).plan(wish.seed(), effort));
+    return Map.of(ring.rotor(), RotorPlanner.of(ring.design(), task).plan(wish.seed(), effort));
   }
 
   private static Map<String, RotorPlan> several(PlanStock stock, PlanWish wish) {
