@@ -67,7 +67,12 @@ final class Nouns {
   }
 
   private static List<Verb> layout(Session s) {
-    return List.of(new LayoutTakeIn(s), new LayoutList(s), new LayoutShow(s), new LayoutRelease(s));
+    return List.of(
+        new LayoutTakeIn(s),
+        new LayoutList(s),
+        new LayoutShow(s),
+        new LayoutRelease(s),
+        new LayoutPicture(s));
   }
 
   private static List<Verb> rotor(Session s) {
