@@ -3,6 +3,7 @@ package lodebook.ui.cli;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Collectors;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.survey.Diagnosis;
@@ -22,6 +23,8 @@ import lodebook.ui.words.Words;
 /// What a survey shows, in words: the verdict in one sentence, the evidence, then what to do.
 final class SurveyWords {
   private static final double MOST_ODDS = 1e6;
+  private static final int WIDTH = 80;
+  private static final int MOST_NAMED = 3;
 
   private final Words words;
 
@@ -47,7 +50,13 @@ final class SurveyWords {
     }
     addRunnerUp(diagnosis, parts);
     diagnosis.measureNext().forEach(n -> parts.add(measure(n)));
-    return String.join("\n", parts);
+    return parts.stream().map(SurveyWords::wrapped).collect(Collectors.joining("\n"));
+  }
+
+  private static String wrapped(String text) {
+    return text.lines()
+        .flatMap(line -> Table.broken(line, WIDTH).stream())
+        .collect(Collectors.joining("\n"));
   }
 
   private String verdict(SurveyChecks.Checked checked) {
@@ -85,7 +94,12 @@ final class SurveyWords {
     boolean speak = !measuring.asSet() || diagnosis.verdict() != Verdict.PASS;
     if (speak && !diagnosis.measuringAlternatives().isEmpty()) {
       List<String> others = diagnosis.measuringAlternatives().stream().map(this::slips).toList();
-      parts.add(words.say("measuring.alternatives", String.join("; ", others)));
+      int more = others.size() - MOST_NAMED;
+      String named = String.join("; ", others.subList(0, Math.min(MOST_NAMED, others.size())));
+      parts.add(
+          more > 0
+              ? words.say("measuring.alternatives-more", named, more)
+              : words.say("measuring.alternatives", named));
     }
     for (Finding finding : diagnosis.findings()) {
       if (!finding.alsoPossibleSlots().isEmpty()) {
