@@ -72,8 +72,7 @@ class FirstDayTest {
     takeIn(shop, "STIR rev A taken in as a draft\n", "g.json", "gear", "import");
     takeIn(shop, "rotor R-0001: slots recorded 12, filled 12 of 12\n", "p.csv", "place", "R-0001");
     takeIn(shop, "S-1\n", "s.csv", "survey", "import", "R-0001", "--meter", "GM-1");
-    said(
-        shop, "S-1: rotor R-0001 PASSES; every magnet is shown right\n", "survey", "check", "S-1");
+    said(shop, "S-1: rotor R-0001 PASSES; every magnet is shown right\n", "survey", "check", "S-1");
   }
 
   private static void said(Shop shop, String expected, String... command) {
