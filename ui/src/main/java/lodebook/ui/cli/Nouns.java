@@ -94,6 +94,7 @@ final class Nouns {
         new PlaceCommand(session),
         new TraceCommand(session),
         new HistoryCommand(session),
+        new DemoCommand(session),
         new CompletionCommand(session),
         new HelpCommand(session));
   }

@@ -163,7 +163,7 @@ public final class Demo {
   }
 
   private String readings(BuiltRotor rotor, List<Facing> facings, long seed) {
-    double[] remanences = rotor.pieces().stream().mapToDouble(workbench::remanenceTesla).toArray();
+    double[] remanences = workbench.remanencesTesla(rotor.pieces());
     return new PracticeGauge(workbench.design(rotor.rotor()), seed).survey(remanences, facings);
   }
 

@@ -1,5 +1,6 @@
 package lodebook.ui.demo;
 
+import java.util.List;
 import lodebook.assembly.layout.RingDesign;
 
 /// What the practice gauge must know of the demo's book to read a ring.
@@ -7,8 +8,8 @@ public interface Workbench {
   /// The design that a rotor is built to.
   RingDesign design(String rotor);
 
-  /// Remanence of a measured piece, tesla at 20 °C.
+  /// Remanences of measured pieces, tesla at 20 °C, in the order of their names.
   ///
-  /// @param piece its name, `LOT/NUMBER`
-  double remanenceTesla(String piece);
+  /// @param pieces names such as `L-2404/0017`
+  double[] remanencesTesla(List<String> pieces);
 }
