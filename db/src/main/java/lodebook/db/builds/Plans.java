@@ -9,7 +9,7 @@ import static lodebook.db.tables.Tables.PLANNED_PLACEMENT;
 import static lodebook.db.tables.Tables.RESERVED_PIECE;
 
 import java.util.ArrayList;
-import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import lodebook.assembly.plan.BatchTask;
@@ -99,7 +99,7 @@ public final class Plans {
         Permission.ANYTHING_ELSE,
         "plan",
         writing -> {
-          Map<String, Long> rotors = new HashMap<>();
+          Map<String, Long> rotors = new LinkedHashMap<>();
           for (PlanDraft draft : drafts) {
             RotorRecord row = Rotors.require(writing.sql(), draft.rotor());
             Rotors.requireOpen(Rotors.byId(writing.sql(), row.getId()));

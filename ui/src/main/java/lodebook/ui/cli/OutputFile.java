@@ -15,11 +15,12 @@ final class OutputFile {
     write(path, text.getBytes(StandardCharsets.UTF_8));
   }
 
-  /// Writes bytes: beside the place first, then renamed.
+  /// Writes bytes: beside the place first, then renamed. Folders that are missing are made.
   static void write(Path path, byte[] bytes) {
     Path whole = path.toAbsolutePath();
     Path part = whole.resolveSibling(whole.getFileName() + ".part");
     try {
+      Files.createDirectories(whole.getParent() == null ? whole : whole.getParent());
       Files.write(part, bytes);
       Files.move(part, whole, StandardCopyOption.REPLACE_EXISTING);
     } catch (IOException failed) {

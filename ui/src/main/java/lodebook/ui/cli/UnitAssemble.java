@@ -1,5 +1,9 @@
 package lodebook.ui.cli;
 
+import java.util.List;
+import lodebook.db.surveys.Survey;
+import lodebook.db.surveys.SurveyChecks;
+import lodebook.db.surveys.Surveys;
 import lodebook.db.units.GearUnit;
 import lodebook.db.units.Units;
 import org.jspecify.annotations.Nullable;
@@ -47,11 +51,25 @@ final class UnitAssemble extends Verb {
       throw wrongLine("line.missing", "--why");
     }
     String reason = override ? why : null;
+    judgeLatest(inner);
+    judgeLatest(outer);
     GearUnit unit =
         session.write(
             book -> new Units(book).assemble(session.act(), code, gear, inner, outer, reason));
     session.done("unit.assembled", unit.code(), unit.gear());
     session.next("lodebook trace " + unit.code());
     return 0;
+  }
+
+  /// Checks a rotor's latest survey where nobody has since it was read.
+  private void judgeLatest(String rotor) {
+    List<Survey> standing =
+        session.read(book -> new Surveys(book).list(rotor)).stream()
+            .filter(survey -> !survey.voided())
+            .toList();
+    if (!standing.isEmpty() && standing.getLast().verdict() == null) {
+      SurveyChecks checks = new SurveyChecks(session::opened);
+      checks.store(session.act(), checks.check(List.of(standing.getLast().code())));
+    }
   }
 }
