@@ -1,10 +1,8 @@
 package lodebook.db.book;
 
 import java.sql.SQLException;
-import java.util.Locale;
 import java.util.Map;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
+import java.util.Objects;
 import lodebook.db.refusal.Refusal;
 import org.jooq.exception.DataAccessException;
 
@@ -47,8 +45,6 @@ final class ConstraintSentences {
           Map.entry("pk_live_rotor", "rule.rotor-in-unit"),
           Map.entry("uq_live_rotor_position", "rule.unit-has-rotor"));
 
-  private static final Pattern NAME = Pattern.compile("\\b(pk|uq|fk|ck)_[a-z_]+");
-
   private ConstraintSentences() {}
 
   /// The refusal for a failed statement; a failure that is no rule of the shop comes back as it is.
@@ -64,13 +60,11 @@ final class ConstraintSentences {
     if (!state.startsWith("23")) {
       return failure;
     }
-    Matcher name = NAME.matcher(String.valueOf(cause.getMessage()).toLowerCase(Locale.ROOT));
-    while (name.find()) {
-      String key = KEYS.get(name.group());
-      if (key != null) {
-        return Refusal.refused(key).because(failure);
-      }
-    }
-    return failure;
+    return ConstraintNames.in(String.valueOf(cause.getMessage()))
+        .map(KEYS::get)
+        .filter(Objects::nonNull)
+        .findFirst()
+        .<RuntimeException>map(key -> Refusal.refused(key).because(failure))
+        .orElse(failure);
   }
 }

@@ -20,7 +20,8 @@ import org.jooq.impl.DSL;
 /// Makes a new book. An embedded one is made under another name and renamed at the end, so that a
 /// half-made book never stands where a book should.
 final class Creation {
-  private static final List<String> OURS = List.of("turn.lock", "turn.who", "new.mv.db");
+  private static final List<String> OURS =
+      List.of("turn.lock", "turn.next", "turn.who", "new.mv.db");
 
   private Creation() {}
 

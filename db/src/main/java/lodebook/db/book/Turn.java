@@ -16,8 +16,12 @@ import org.jspecify.annotations.Nullable;
 
 /// One process's turn at an embedded book: a lock of the operating system on `turn.lock`, which
 /// goes with the process however it ends. `turn.who` beside it says who has it.
+///
+/// Whoever waits for the turn first waits for the place before it, a lock on `turn.next`, and gives
+/// that up when the turn is his. So a process that does one operation after the other cannot take
+/// the turn again before the one that waits has had it.
 final class Turn implements AutoCloseable {
-  private static final Duration STEP = Duration.ofMillis(5);
+  private static final Duration STEP = Duration.ofMillis(2);
 
   private final FileChannel channel;
 
@@ -27,9 +31,10 @@ final class Turn implements AutoCloseable {
 
   /// Waits for the turn, at most the visit's patience; then refuses and names who has it.
   static Turn take(BookAddress.Folder folder, Visit visit) {
-    FileChannel channel = open(folder);
-    try {
-      if (!await(channel, visit.patience())) {
+    long until = System.nanoTime() + visit.patience().toNanos();
+    FileChannel channel = open(folder, "turn.lock");
+    try (FileChannel next = open(folder, "turn.next")) {
+      if (!await(next, until) || !await(channel, until)) {
         throw Refusal.cannotOpen("book.busy", folder.shown(), holder(folder));
       }
       Turn turn = new Turn(channel);
@@ -44,10 +49,10 @@ final class Turn implements AutoCloseable {
     }
   }
 
-  private static FileChannel open(BookAddress.Folder folder) {
+  private static FileChannel open(BookAddress.Folder folder, String name) {
     try {
       return FileChannel.open(
-          folder.path().resolve("turn.lock"), StandardOpenOption.CREATE, StandardOpenOption.WRITE);
+          folder.path().resolve(name), StandardOpenOption.CREATE, StandardOpenOption.WRITE);
     } catch (AccessDeniedException denied) {
       throw Refusal.cannotOpen("book.not-writable", folder.shown()).because(denied);
     } catch (IOException failure) {
@@ -55,8 +60,7 @@ final class Turn implements AutoCloseable {
     }
   }
 
-  private static boolean await(FileChannel channel, Duration patience) throws IOException {
-    long until = System.nanoTime() + patience.toNanos();
+  private static boolean await(FileChannel channel, long until) throws IOException {
     while (true) {
       if (tryLock(channel) != null) {
         return true;
