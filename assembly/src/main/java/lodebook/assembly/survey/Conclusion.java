@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeSet;
 import lodebook.assembly.layout.Facing;
 import lodebook.assembly.layout.ProbePoint;
@@ -12,13 +13,13 @@ import org.jspecify.annotations.Nullable;
 /// Turns an account of a survey into a verdict.
 final class Conclusion {
   private static final double LEAST_ODDS = 20;
-  private static final double SHOWN_SEPARATION = 2 * Math.log(LEAST_ODDS);
 
   private final RingModel ring;
   private final List<Reading> readings;
   private final Account account;
   private final Priors priors;
   private final ReadingFinder finder;
+  private final Set<Integer> notShown;
 
   Conclusion(RingModel ring, List<Reading> readings, Account account, Priors priors) {
     this.ring = ring;
@@ -26,6 +27,7 @@ final class Conclusion {
     this.account = account;
     this.priors = priors;
     this.finder = new ReadingFinder(ring);
+    this.notShown = NotShown.in(account.rows());
   }
 
   Diagnosis diagnosis() {
@@ -51,7 +53,7 @@ final class Conclusion {
     List<MeasureNext> next = new ArrayList<>();
     Verdict verdict;
     Diagnosis.Reason reason;
-    if (best.explanation().faults().isEmpty() && !notShown().isEmpty()) {
+    if (best.explanation().faults().isEmpty() && !notShown.isEmpty()) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.NOT_ALL_SHOWN;
     } else if (odds < LEAST_ODDS) {
@@ -71,10 +73,11 @@ final class Conclusion {
     next.addAll(againReadings(best.explanation()));
     if (verdict != Verdict.PASS) {
       next.addAll(indexReadings(findings));
-      for (int slot : notShown()) {
+      for (int slot : notShown) {
         next.add(new MeasureNext(finder.showing(slot), MeasureNext.Why.NOT_YET_SHOWN, List.of()));
       }
     }
+    next.addAll(emptyPockets(best));
     return new Diagnosis(
         verdict,
         findings,
@@ -91,6 +94,7 @@ final class Conclusion {
     Judged best = account.best();
     return account.weighed().stream()
         .filter(j -> saysOther(j.explanation(), best.explanation()))
+        .filter(j -> !addsOnlyUnseen(j.explanation(), best.explanation()))
         .findFirst()
         .orElse(null);
   }
@@ -99,6 +103,18 @@ final class Conclusion {
   /// matter of degree: weak shades into missing, reversed does not.
   private static boolean saysOther(Explanation one, Explanation other) {
     return !family(one).equals(family(other));
+  }
+
+  /// Whether an explanation says the same and only adds faults of magnets of which nothing was read
+  /// yet. Such a fault is as likely before the readings as after them.
+  private boolean addsOnlyUnseen(Explanation more, Explanation found) {
+    Map<Integer, FaultKind> added = family(more);
+    Map<Integer, FaultKind> known = family(found);
+    boolean holds = added.entrySet().containsAll(known.entrySet());
+    added.keySet().removeAll(known.keySet());
+    return holds
+        && !known.isEmpty()
+        && added.keySet().stream().allMatch(place -> notShown.contains(place + 1));
   }
 
   private static Map<Integer, FaultKind> family(Explanation explanation) {
@@ -236,6 +252,30 @@ final class Conclusion {
         .toList();
   }
 
+  private List<MeasureNext> emptyPockets(Judged best) {
+    return new EmptyPockets(account.rows(), priors)
+        .alike(best).stream()
+            .filter(slot -> !notShown.contains(slot))
+            .map(this::emptyPocket)
+            .toList();
+  }
+
+  private MeasureNext emptyPocket(int slot) {
+    Fault missing = Fault.of(slot - 1, FaultKind.MISSING);
+    List<Fault> others =
+        account.best().explanation().faults().stream()
+            .filter(f -> f.ofMagnet() && f.place() != slot - 1)
+            .toList();
+    ProbePoint point =
+        finder
+            .parting(account.best().explanation(), new Explanation(others).with(missing), 1)
+            .getFirst();
+    return new MeasureNext(
+        point,
+        MeasureNext.Why.EMPTY_POCKET_ALIKE,
+        List.of(new NamedFault(slot, FaultKind.MISSING)));
+  }
+
   private List<MeasureNext> indexReadings(List<Finding> findings) {
     return findings.stream()
         .filter(f -> !f.alsoPossibleSlots().isEmpty())
@@ -246,23 +286,5 @@ final class Conclusion {
                     MeasureNext.Why.AGAINST_INDEX_MARK,
                     List.of(new NamedFault(f.slot(), f.kind()))))
         .toList();
-  }
-
-  /// Slots, from 1, whose magnet could be reversed without these readings telling at 20 to 1.
-  private List<Integer> notShown() {
-    Cholesky factor = new Cholesky(account.rows().covariance(Explanation.NONE));
-    double[] right = ring.rightPolarisation();
-    List<Integer> slots = new ArrayList<>();
-    for (int slot = 0; slot < ring.slots(); slot++) {
-      if (ring.filled(slot)) {
-        double[] change =
-            factor.whiten(
-                account.rows().answer(slot, -2 * right[2 * slot], -2 * right[2 * slot + 1]));
-        if (Judge.dot(change, change) < SHOWN_SEPARATION) {
-          slots.add(slot + 1);
-        }
-      }
-    }
-    return slots;
   }
 }

@@ -42,6 +42,17 @@ record Explanation(List<Fault> faults) {
     return new Explanation(faults.stream().filter(Fault::ofMagnet).toList());
   }
 
+  /// Natural logarithm of the prior odds against a right ring, without the amounts.
+  double logPrior(Priors priors) {
+    double log = 0;
+    boolean company = false;
+    for (Fault fault : faults) {
+      log += Math.log(company ? fault.priorInCompany(priors) : fault.prior(priors));
+      company |= fault.kind() == FaultKind.REVERSED;
+    }
+    return log;
+  }
+
   boolean namesNoMagnet() {
     return faults.stream().noneMatch(Fault::ofMagnet);
   }

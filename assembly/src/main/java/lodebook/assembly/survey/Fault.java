@@ -112,6 +112,11 @@ record Fault(int place, FaultKind kind, double amount) {
     return 3 * (1 - share) * (1 - share) / (far * far * far - near * near * near);
   }
 
+  /// The same where another magnet is reversed already.
+  double priorInCompany(Priors priors) {
+    return kind == FaultKind.REVERSED ? priors.furtherReversed() : prior(priors);
+  }
+
   double prior(Priors priors) {
     return switch (kind) {
       case REVERSED -> priors.reversed();

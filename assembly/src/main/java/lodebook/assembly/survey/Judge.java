@@ -48,9 +48,7 @@ final class Judge {
     double[] white = factor.whiten(residual);
     double misfit = dot(white, white);
     double logWeight = -0.5 * (factor.logDeterminant() + rows.count() * LOG_TWO_PI);
-    for (Fault fault : start.faults()) {
-      logWeight += Math.log(fault.prior(priors));
-    }
+    logWeight += start.logPrior(priors);
     List<Fault> fitted = start.faults().stream().filter(Fault::fitted).toList();
     if (fitted.isEmpty()) {
       return new Judged(start, logWeight - 0.5 * misfit, misfit, fit(misfit, rows.count()));

@@ -19,6 +19,8 @@ public record MeasureNext(ProbePoint point, Why why, List<NamedFault> magnets) {
     PARTS_EXPLANATIONS,
     /// Nothing read so far shows whether this magnet is right.
     NOT_YET_SHOWN,
+    /// An empty pocket there would read nearly the same: look, or read there.
+    EMPTY_POCKET_ALIKE,
     /// The reading there belongs to nothing: take it again.
     READ_AGAIN,
     /// Slots must be counted from the index mark, or the fault may be in another slot.

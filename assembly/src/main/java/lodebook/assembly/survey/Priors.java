@@ -3,6 +3,8 @@ package lodebook.assembly.survey;
 /// What is believed before the first reading. Each is a probability.
 ///
 /// @param reversed per placed magnet, that it is reversed
+/// @param furtherReversed per placed magnet, that it is reversed too where another one is: the same
+///   hand, tray or mistake, so reversals come in company
 /// @param quarterTurn per placed magnet and way, that it is turned by a quarter
 /// @param turned per placed magnet that can stand at any angle, that it is turned by another angle
 /// @param missing per placed magnet, that it is not there
@@ -18,6 +20,7 @@ package lodebook.assembly.survey;
 ///   accuracy
 public record Priors(
     double reversed,
+    double furtherReversed,
     double quarterTurn,
     double turned,
     double missing,
@@ -32,5 +35,6 @@ public record Priors(
   /// What holds where a shop states nothing else (this project's choice, see
   /// docs/decisions/survey-model.md).
   public static final Priors DEFAULT =
-      new Priors(0.02, 0.002, 0.002, 0.001, 0.004, 0.00003, 0.0003, 0.05, 0.01, 0.02, 0.02, 0.005);
+      new Priors(
+          0.02, 0.1, 0.002, 0.002, 0.001, 0.004, 0.00003, 0.0003, 0.05, 0.01, 0.02, 0.02, 0.005);
 }

@@ -29,11 +29,13 @@ final class Screen {
   private final double[][] overlap;
   private final double[] residual;
   private final double[] inverseDiagonal;
+  private final double company;
 
   Screen(RowModel rows, Cholesky factor, Priors priors) {
     this.rows = rows;
     this.factor = factor;
     this.priors = priors;
+    company = Math.log(priors.furtherReversed() / priors.reversed());
     RingModel ring = rows.ring();
     for (int slot = 0; slot < ring.slots(); slot++) {
       faults.addAll(Possible.of(ring, slot));
@@ -148,7 +150,7 @@ final class Screen {
       double[] line = overlap[e];
       int place = faults.get(e).place();
       for (int f = e + 1; f < alone.length; f++) {
-        double score = alone[e] + alone[f] - line[f];
+        double score = alone[e] + alone[f] - line[f] + inCompany(e, f);
         if (score > best.bar() && faults.get(f).place() != place) {
           best.offer(score, new int[] {e, f});
         }
@@ -164,9 +166,12 @@ final class Screen {
       int[] members = scored.what();
       for (int e = 0; e < alone.length; e++) {
         double score = scored.score() + alone[e];
+        boolean among = false;
         for (int member : members) {
           score -= overlap[member][e];
+          among |= reversed(member);
         }
+        score += among && reversed(e) ? company : 0;
         if (score > best.bar() && free(members, e)) {
           int[] more = Arrays.copyOf(members, members.length + 1);
           more[members.length] = e;
@@ -181,6 +186,14 @@ final class Screen {
       }
     }
     return best.sorted();
+  }
+
+  private double inCompany(int one, int other) {
+    return reversed(one) && reversed(other) ? company : 0;
+  }
+
+  private boolean reversed(int index) {
+    return faults.get(index).kind() == FaultKind.REVERSED;
   }
 
   private boolean free(int[] members, int candidate) {

@@ -17,13 +17,23 @@ final class Trials {
   static final Meter METER = new Meter("trial", 0.01, 0.2e-3);
 
   /// @param right the truth was said
+  /// @param doubted something else was said, but with the request to look whether the pocket is
+  ///   empty that is the truth
   /// @param cannotTell nothing was claimed
   /// @param wrongOnes where something else was claimed
   /// @param unsureOnes where nothing was claimed
-  record Count(int right, int cannotTell, List<String> wrongOnes, List<String> unsureOnes) {
+  record Count(
+      int right, int doubted, int cannotTell, List<String> wrongOnes, List<String> unsureOnes) {
     @Override
     public String toString() {
-      return "right " + right + ", cannot tell " + cannotTell + ", wrong " + wrongOnes.size();
+      return "right "
+          + right
+          + ", doubted "
+          + doubted
+          + ", cannot tell "
+          + cannotTell
+          + ", wrong "
+          + wrongOnes.size();
     }
   }
 
@@ -39,6 +49,7 @@ final class Trials {
 
   static Count run(int count, long seed, BiFunction<SplittableRandom, Integer, Trial> make) {
     int right = 0;
+    int doubted = 0;
     int unsure = 0;
     List<String> wrong = new ArrayList<>();
     List<String> unsureOnes = new ArrayList<>();
@@ -56,11 +67,13 @@ final class Trials {
       } else if (said.verdict() == Verdict.CANNOT_TELL) {
         unsure++;
         unsureOnes.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
+      } else if (isDoubted(trial, said)) {
+        doubted++;
       } else {
         wrong.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       }
     }
-    return new Count(right, unsure, wrong, unsureOnes);
+    return new Count(right, doubted, unsure, wrong, unsureOnes);
   }
 
   static String brief(Diagnosis said) {
@@ -95,6 +108,17 @@ final class Trials {
     return said.verdict() == verdict
         && measured
         && (names.equals(trial.truth()) || lookAlike(trial, said));
+  }
+
+  /// Whether the truth is an empty pocket into which a person is asked to look.
+  private static boolean isDoubted(Trial trial, Diagnosis said) {
+    Set<String> doubts =
+        said.measureNext().stream()
+            .filter(m -> m.why() == MeasureNext.Why.EMPTY_POCKET_ALIKE)
+            .flatMap(m -> m.magnets().stream())
+            .map(f -> f.slot() + " " + f.kind().word())
+            .collect(Collectors.toSet());
+    return !trial.truth().isEmpty() && doubts.containsAll(trial.truth());
   }
 
   /// Whether the truth is among the slots that look-alike slips leave possible.
