@@ -18,7 +18,7 @@ final class StartSpeed {
         public static void main(String[] args) throws Exception {
           try (var connection = java.sql.DriverManager.getConnection(args[0], "sa", "");
               var statement = connection.createStatement();
-              var rows = statement.executeQuery("select count from lot fetch first row only")) {
+              var rows = statement.executeQuery("select id from lot fetch first row only")) {
             rows.next();
             System.out.println(rows.getInt(1));
           }
