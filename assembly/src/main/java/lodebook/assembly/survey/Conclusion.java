@@ -13,6 +13,8 @@ import org.jspecify.annotations.Nullable;
 /// Turns an account of a survey into a verdict.
 final class Conclusion {
   private static final double LEAST_ODDS = 20;
+  private static final int TRIED_WITH_FREE_GAIN = 5;
+  private static final double WITHIN_REACH = 10;
 
   private final RingModel ring;
   private final List<Reading> readings;
@@ -56,7 +58,7 @@ final class Conclusion {
     if (best.explanation().faults().isEmpty() && !notShown.isEmpty()) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.NOT_ALL_SHOWN;
-    } else if (odds < LEAST_ODDS) {
+    } else if (odds < LEAST_ODDS || leansOnTheGain(best, whole)) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.TOO_CLOSE;
       next.addAll(partingReadings(best, second));
@@ -97,6 +99,18 @@ final class Conclusion {
         .filter(j -> !addsOnlyUnseen(j.explanation(), best.explanation()))
         .findFirst()
         .orElse(null);
+  }
+
+  /// Whether another explanation would win if all readings could be off together: a meter or probe
+  /// beyond its stated accuracy must not make a fault.
+  private boolean leansOnTheGain(Judged best, WholeRingFit whole) {
+    return !best.explanation().namesNoMagnet()
+        && account.weighed().stream()
+            .filter(j -> saysOther(j.explanation(), best.explanation()))
+            .filter(j -> !addsOnlyUnseen(j.explanation(), best.explanation()))
+            .limit(TRIED_WITH_FREE_GAIN)
+            .filter(j -> j.logWeight() > best.logWeight() - WITHIN_REACH)
+            .anyMatch(j -> whole.logOddsFreed(best, j) < 0);
   }
 
   /// Whether two explanations name other magnets, or say of the same magnets what cannot be a

@@ -55,27 +55,87 @@ final class SlipCandidates {
   List<Candidate> withOneFault(double before, double after) {
     List<Candidate> candidates = new ArrayList<>();
     double[] right = ring.rightPolarisation();
+    double[] changed = new double[readings.size()];
+    List<Fault> possible = new ArrayList<>();
+    for (int slot = 0; slot < ring.slots(); slot++) {
+      possible.addAll(Possible.of(ring, slot));
+    }
     for (Candidate without : like(Slip.NONE, Explanation.NONE, before)) {
       if (without.slip().equals(Slip.NONE)) {
         continue;
       }
       double[][] response = response(without.slip());
       double[] mean = times(response, right);
-      for (int slot = 0; slot < ring.slots(); slot++) {
-        for (Fault fault : Possible.of(ring, slot)) {
-          double[] changed = mean.clone();
-          double[] change = fault.change(right);
-          for (int i = 0; i < changed.length; i++) {
-            changed[i] += response[i][2 * slot] * change[0] + response[i][2 * slot + 1] * change[1];
+      Sums sums = new Sums(response, mean, freed(without.slip()));
+      for (Fault fault : possible) {
+        double[] change = fault.change(right);
+        if (sums.leftOver(fault.place(), change) < after) {
+          int at = 2 * fault.place();
+          for (int i = 0; i < mean.length; i++) {
+            changed[i] = mean[i] + response[i][at] * change[0] + response[i][at + 1] * change[1];
           }
-          Candidate candidate = candidate(without.slip(), Explanation.NONE.with(fault), changed);
-          if (candidate.leftOver() < after) {
-            candidates.add(candidate);
-          }
+          candidates.add(candidate(without.slip(), Explanation.NONE.with(fault), changed));
         }
       }
     }
     return candidates;
+  }
+
+  /// Inner products from which the energies with any one fault follow.
+  private static final class Sums {
+    private final double[] byMean;
+    private final double[] byRest;
+    private final double[] squares;
+    private final double[] crossed;
+    private final double energy;
+    private final double rest;
+
+    Sums(double[][] response, double[] mean, double[] freed) {
+      int width = response[0].length;
+      byMean = new double[width];
+      byRest = new double[width];
+      squares = new double[width];
+      crossed = new double[width / 2];
+      double meanSquare = 0;
+      double restSquare = 0;
+      for (int i = 0; i < mean.length; i++) {
+        double[] line = response[i];
+        double m = mean[i];
+        double r = freed[i] - m;
+        meanSquare += m * m;
+        restSquare += r * r;
+        for (int c = 0; c < width; c++) {
+          byMean[c] += line[c] * m;
+          byRest[c] += line[c] * r;
+          squares[c] += line[c] * line[c];
+        }
+        for (int slot = 0; slot < crossed.length; slot++) {
+          crossed[slot] += line[2 * slot] * line[2 * slot + 1];
+        }
+      }
+      energy = meanSquare;
+      rest = restSquare;
+    }
+
+    double leftOver(int slot, double[] change) {
+      int a = 2 * slot;
+      int b = a + 1;
+      double square =
+          change[0] * change[0] * squares[a]
+              + 2 * change[0] * change[1] * crossed[slot]
+              + change[1] * change[1] * squares[b];
+      double whole = energy + 2 * (change[0] * byMean[a] + change[1] * byMean[b]) + square;
+      double left = rest - 2 * (change[0] * byRest[a] + change[1] * byRest[b]) + square;
+      return whole > 0 ? left / whole : Double.POSITIVE_INFINITY;
+    }
+  }
+
+  private double[] freed(Slip slip) {
+    double[] freed = new double[readings.size()];
+    for (int i = 0; i < freed.length; i++) {
+      freed[i] = slip.freed(readings.get(i));
+    }
+    return freed;
   }
 
   private Candidate candidate(Slip slip, Explanation explanation, double[] mean) {

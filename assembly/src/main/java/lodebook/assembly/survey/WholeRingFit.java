@@ -42,6 +42,13 @@ final class WholeRingFit {
         && freed.logWeight() + Math.log(priors.wholeRing()) > judged.logWeight();
   }
 
+  /// Natural logarithm of the odds of one explanation against another if the gain is free.
+  double logOddsFreed(Judged one, Judged other) {
+    Judge judge = new Judge(free, priors);
+    return judge.judge(one.explanation()).logWeight()
+        - judge.judge(other.explanation()).logWeight();
+  }
+
   /// By what the readings would fit, or null where neither takes away most of the misfit.
   @Nullable WholeRing estimate() {
     Explanation explanation = freed.explanation();

@@ -178,4 +178,41 @@ class SurveyExplainerTest {
     assertEquals(
         "layout TRY-12@A has slots 1 to 12, a reading names slot 13", refused.getMessage());
   }
+
+  /// Read radially only, a magnet along the ring can be absent without the readings saying so; then
+  /// people are asked to look. (One survey in a thousand reads so much like a right ring that
+  /// nobody is asked; there is none among these.)
+  @Test
+  void whereAnAbsenceReadsNearlyTheSamePeopleAreAskedToLook() {
+    RingDesign radial = Rings.blocks12(Rings.RADIAL);
+    ProbeResponses responses = new ProbeResponses(radial);
+    NamedFault absence = new NamedFault(2, FaultKind.MISSING);
+    int asked = 0;
+    for (long seed = 101; seed <= 140; seed++) {
+      RingTruth truth =
+          new RingTruth(
+              radial, 12, List.of(Fault.of(1, FaultKind.MISSING)), new SplittableRandom(seed));
+      Diagnosis diagnosis =
+          new SurveyExplainer(truth.recorded(), Priors.DEFAULT, responses)
+              .explain(truth.read(12, EXACT, 0, 0));
+      if (diagnosis.verdict() == Verdict.CANNOT_TELL || named(diagnosis).contains(absence)) {
+        continue;
+      }
+      asked++;
+      assertTrue(
+          diagnosis.measureNext().stream()
+              .filter(m -> m.why() == MeasureNext.Why.EMPTY_POCKET_ALIKE)
+              .anyMatch(m -> m.magnets().contains(absence)),
+          diagnosis::toString);
+    }
+    assertTrue(asked > 0, "some surveys lean on the prior");
+  }
+
+  @Test
+  void aRightRingReadBothWaysAsksForNothingMore() {
+    RingTruth truth = truth(List.of(), 3);
+    Diagnosis diagnosis = explain(truth.recorded(), truth.read(12, EXACT, 0, 0));
+    assertEquals(Verdict.PASS, diagnosis.verdict());
+    assertEquals(List.of(), diagnosis.measureNext());
+  }
 }

@@ -14,7 +14,7 @@ import org.junit.jupiter.api.TestFactory;
 /// same lines are made by [SurveyTruthStudy].
 class SurveyTrialsTest {
   private static final long SEED = 20_000;
-  private static final int TRIALS = 12;
+  private static final int TRIALS = 6;
 
   @TestFactory
   List<DynamicTest> twelveSlots() {

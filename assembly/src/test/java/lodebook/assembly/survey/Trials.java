@@ -19,17 +19,25 @@ final class Trials {
   /// @param right the truth was said
   /// @param doubted something else was said, but with the request to look whether the pocket is
   ///   empty that is the truth
+  /// @param drowned a weak magnet passed although the readings speak less than 20 to 1 for it
   /// @param cannotTell nothing was claimed
   /// @param wrongOnes where something else was claimed
   /// @param unsureOnes where nothing was claimed
   record Count(
-      int right, int doubted, int cannotTell, List<String> wrongOnes, List<String> unsureOnes) {
+      int right,
+      int doubted,
+      int drowned,
+      int cannotTell,
+      List<String> wrongOnes,
+      List<String> unsureOnes) {
     @Override
     public String toString() {
       return "right "
           + right
           + ", doubted "
           + doubted
+          + ", drowned "
+          + drowned
           + ", cannot tell "
           + cannotTell
           + ", wrong "
@@ -50,6 +58,7 @@ final class Trials {
   static Count run(int count, long seed, BiFunction<SplittableRandom, Integer, Trial> make) {
     int right = 0;
     int doubted = 0;
+    int drowned = 0;
     int unsure = 0;
     List<String> wrong = new ArrayList<>();
     List<String> unsureOnes = new ArrayList<>();
@@ -69,11 +78,13 @@ final class Trials {
         unsureOnes.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       } else if (isDoubted(trial, said)) {
         doubted++;
+      } else if (isDrowned(trial, said)) {
+        drowned++;
       } else {
         wrong.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       }
     }
-    return new Count(right, doubted, unsure, wrong, unsureOnes);
+    return new Count(right, doubted, drowned, unsure, wrong, unsureOnes);
   }
 
   static String brief(Diagnosis said) {
@@ -119,6 +130,32 @@ final class Trials {
             .map(f -> f.slot() + " " + f.kind().word())
             .collect(Collectors.toSet());
     return !trial.truth().isEmpty() && doubts.containsAll(trial.truth());
+  }
+
+  /// Whether a ring with a weak magnet passed that the readings, each weighed with the covariance
+  /// of the truth, make less than 20 times as likely as a right ring.
+  private static boolean isDrowned(Trial trial, Diagnosis said) {
+    boolean weak = trial.faults().stream().anyMatch(f -> f.kind() == FaultKind.WEAK);
+    if (!weak || said.verdict() != Verdict.PASS) {
+      return false;
+    }
+    RingModel ring = new RingModel(trial.ring(), new ProbeResponses(trial.ring().design()));
+    RowModel rows = new RowModel(ring, Slip.NONE.rows(trial.readings(), ring.layout()));
+    double gain =
+        logLikelihood(rows, new Explanation(trial.faults()))
+            - logLikelihood(rows, Explanation.NONE);
+    return gain < Math.log(20);
+  }
+
+  private static double logLikelihood(RowModel rows, Explanation explanation) {
+    Cholesky factor = new Cholesky(rows.covariance(explanation));
+    double[] mean = rows.mean(rows.ring().polarisation(explanation));
+    double[] residual = rows.read();
+    for (int i = 0; i < residual.length; i++) {
+      residual[i] -= mean[i];
+    }
+    double[] white = factor.whiten(residual);
+    return -0.5 * (factor.logDeterminant() + Judge.dot(white, white));
   }
 
   /// Whether the truth is among the slots that look-alike slips leave possible.
