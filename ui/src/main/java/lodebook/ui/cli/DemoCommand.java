@@ -15,6 +15,7 @@ import lodebook.assembly.magnet.Strength;
 import lodebook.db.book.Book;
 import lodebook.db.book.BookAddress;
 import lodebook.db.builds.Rotors;
+import lodebook.db.refusal.Refusal;
 import lodebook.db.stock.PieceName;
 import lodebook.db.stock.Pieces;
 import lodebook.ui.demo.Demo;
@@ -60,7 +61,7 @@ final class DemoCommand extends Verb {
       }
       Path folder = into.toAbsolutePath().normalize();
       if (Files.exists(folder) && (!Files.isDirectory(folder) || !isEmpty(folder))) {
-        throw wrongLine("demo.not-empty", into);
+        throw Refusal.refused("demo.not-empty", into).remedy("lodebook demo --into NEW-FOLDER");
       }
       return Files.createDirectories(folder);
     } catch (IOException failed) {

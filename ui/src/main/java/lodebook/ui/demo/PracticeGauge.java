@@ -48,7 +48,7 @@ final class PracticeGauge {
     RingPolarisation polarisation =
         MutualMagnetisation.of(design).answerTo(RingPolarisation.of(remanencesTesla, leaning));
     List<ReadingPlace> places = new ArrayList<>();
-    StringBuilder names = new StringBuilder();
+    StringBuilder file = new StringBuilder();
     List<String> rows = new ArrayList<>();
     for (int slot = 1; slot <= design.slots(); slot++) {
       for (Spot spot : design.layout().probe().spots()) {
@@ -64,13 +64,13 @@ final class PracticeGauge {
       }
     }
     double[] flux = read(places, polarisation, spread);
-    names.append("slot,spot,component,value,unit,temperature_C\n");
+    file.append("slot,spot,component,value,unit,temperature_C\n");
     for (int i = 0; i < flux.length; i++) {
-      names.append(
+      file.append(
           String.format(Locale.ROOT, "%s,%.1f,mT,20%n", rows.get(i), flux[i] * 1e3)
               .replace("\r", ""));
     }
-    return names.toString();
+    return file.toString();
   }
 
   private double[] read(List<ReadingPlace> places, RingPolarisation polarisation, Spread spread) {
