@@ -41,6 +41,9 @@ final class Aged {
             .replaceFirst(",fletcher:.*", "");
     byte[] bytes = text.getBytes(StandardCharsets.ISO_8859_1);
     String sum = Integer.toHexString(DataUtils.getFletcher32(bytes, 0, bytes.length));
-    return (text + ",fletcher:" + sum + "\n").getBytes(StandardCharsets.ISO_8859_1);
+    // a sum with fewer digits leaves nothing of the old one behind it
+    String line = text + ",fletcher:" + sum + "\n";
+    return String.format("%-" + (header.length() + 1) + "s", line)
+        .getBytes(StandardCharsets.ISO_8859_1);
   }
 }
