@@ -10,6 +10,7 @@ import java.util.List;
 import lodebook.db.book.Act;
 import lodebook.db.book.Book;
 import lodebook.db.book.Writing;
+import lodebook.db.code.Code;
 import lodebook.db.code.CodeKind;
 import lodebook.db.code.CodeText;
 import lodebook.db.code.Codes;
@@ -88,6 +89,30 @@ public final class Batches {
           writing, outer, shape.serial(number + 1), new Rotors.InBatch(batchId, gear, "outer"));
       number += 2;
     }
+  }
+
+  /// The place of one more rotor in a batch, inner or outer by its layout; refused where the
+  /// batch's gear model has no ring of that layout.
+  static Rotors.InBatch placeFor(
+      DSLContext sql, String batch, String serial, LayoutRevision revision) {
+    Code found = Codes.require(sql, batch, CodeKind.BATCH);
+    long gear = sql.fetchSingle(BATCH, BATCH.ID.eq(found.id())).getGearRevisionId();
+    GearRevision model = Gears.byId(sql, gear);
+    if (revision.id() == model.innerLayoutId()) {
+      return new Rotors.InBatch(found.id(), null, "inner");
+    }
+    if (revision.id() == model.outerLayoutId()) {
+      return new Rotors.InBatch(found.id(), null, "outer");
+    }
+    throw Refusal.refused(
+            "rotor.not-of-batch",
+            serial,
+            revision.layout().name(),
+            found.shown(),
+            model.name(),
+            Layouts.byId(sql, model.innerLayoutId()).layout().name(),
+            Layouts.byId(sql, model.outerLayoutId()).layout().name())
+        .remedy("lodebook batch show " + found.shown());
   }
 
   /// All batches by their numbers.

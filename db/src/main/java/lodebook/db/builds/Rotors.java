@@ -34,24 +34,39 @@ public final class Rotors {
   /// @param layout a released layout: `CODE` or `CODE@REVISION`
   /// @param serial the rotor's number
   public Rotor open(Act act, String layout, String serial) {
+    return open(act, layout, serial, null);
+  }
+
+  /// Opens a rotor alone or as one more of a batch, for no gear in particular.
+  ///
+  /// @param layout a released layout: `CODE` or `CODE@REVISION`
+  /// @param serial the rotor's number
+  /// @param batch a batch whose gear model has a ring of this layout, or null
+  public Rotor open(Act act, String layout, String serial, @Nullable String batch) {
     return book.write(
         act,
         Permission.ANYTHING_ELSE,
         "rotor open",
         writing -> {
           LayoutRevision revision = Layouts.requireReleased(writing.sql(), layout);
-          long id = insert(writing, revision, serial, null);
+          InBatch place =
+              batch == null ? null : Batches.placeFor(writing.sql(), batch, serial, revision);
+          long id = insert(writing, revision, serial, place);
           writing.line().field("rotor", serial);
-          return byId(writing.sql(), id);
+          Rotor opened = byId(writing.sql(), id);
+          if (opened.batch() != null) {
+            writing.line().subject(opened.batch()).field("batch", opened.batch());
+          }
+          return opened;
         });
   }
 
   /// A rotor's place in its batch.
   ///
   /// @param batchId the batch
-  /// @param gearNumber for which gear, from 1
+  /// @param gearNumber for which gear, from 1; null for none in particular
   /// @param ring `inner` or `outer`
-  record InBatch(long batchId, int gearNumber, String ring) {}
+  record InBatch(long batchId, @Nullable Integer gearNumber, String ring) {}
 
   static long insert(
       Writing writing, LayoutRevision revision, String serial, @Nullable InBatch place) {
@@ -61,7 +76,8 @@ public final class Rotors {
     row.setLayoutRevisionId(revision.id());
     if (place != null) {
       row.setBatchId(place.batchId());
-      row.setGearNumber((long) place.gearNumber());
+      Integer gear = place.gearNumber();
+      row.setGearNumber(gear == null ? null : gear.longValue());
       row.setRing(place.ring());
     }
     row.setState("open");

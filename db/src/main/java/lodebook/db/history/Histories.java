@@ -13,6 +13,7 @@ import java.util.Map;
 import lodebook.db.book.Book;
 import lodebook.db.chain.LineText;
 import lodebook.db.code.CodeText;
+import lodebook.db.refusal.Refusal;
 import lodebook.db.stock.PieceName;
 import lodebook.db.tables.tables.records.HistoryRecord;
 import org.jooq.Condition;
@@ -28,7 +29,8 @@ public final class Histories {
     this.book = book;
   }
 
-  /// Lines in their order: all, or those that speak of a number of the shop or of a piece.
+  /// Lines in their order: all, or those that speak of a number of the shop or of a piece. A number
+  /// of which no line speaks is refused.
   ///
   /// @param code a number, a piece as `LOT/NUMBER`, or null for all
   public List<HistoryEntry> list(@Nullable String code) {
@@ -39,7 +41,11 @@ public final class Histories {
                 select(HISTORY_SUBJECT.SEQUENCE)
                     .from(HISTORY_SUBJECT)
                     .where(HISTORY_SUBJECT.FOLDED.eq(folded(code))));
-    return book.read(sql -> fetch(sql, which));
+    List<HistoryEntry> lines = book.read(sql -> fetch(sql, which));
+    if (code != null && lines.isEmpty()) {
+      throw Refusal.refused("history.unknown", code).remedy("lodebook history");
+    }
+    return lines;
   }
 
   private static String folded(String code) {

@@ -123,6 +123,31 @@ class GearDayTest {
     }
   }
 
+  @ParameterizedTest
+  @EnumSource
+  void aBatchTakesOneMoreRotorOfItsLayouts(TestBook database) {
+    try (Workshop shop = withLayouts(database)) {
+      release(shop.book());
+      new Layouts(shop.book()).importDraft(PLANNER, Workshop.inner("OTHER", "A"));
+      new Layouts(shop.book()).release(PLANNER, "OTHER");
+      new Batches(shop.book()).open(PLANNER, "B-1", "GEAR", 1, null);
+      Rotors rotors = new Rotors(shop.book());
+      rotors.open(BENCH, "OUT", "R-9", "b-1");
+      assertEquals(
+          List.of("B-1-0001 inner 1 IN@A", "B-1-0002 outer 1 OUT@A", "R-9 outer null OUT@A"),
+          told(new Batches(shop.book()).show("B-1").rotors()));
+      assertRefused(
+          "rotor R-10 would be built to OTHER@A; batch B-1 of GEAR@A takes IN@A and OUT@A",
+          "lodebook batch show B-1",
+          () -> rotors.open(BENCH, "OTHER", "R-10", "B-1"));
+      assertRefused(
+          "there is no batch B-2",
+          "lodebook batch list",
+          () -> rotors.open(BENCH, "IN", "R-10", "B-2"));
+      assertEquals(List.of(), Verification.of(shop.book(), null).faults());
+    }
+  }
+
   private static List<String> told(List<Rotor> rotors) {
     return rotors.stream()
         .map(r -> r.code() + " " + r.ring() + " " + r.gearNumber() + " " + r.layout())

@@ -32,7 +32,7 @@ public final class LotFile {
   private static NewLot row(Cells cells, Once numbers) {
     String lot = Numbers.check(cells, "lot", numbers);
     Double remanence = cells.numberOrNull("certificate_br_mT");
-    if (remanence != null && !(remanence > 0 && remanence <= STRONGEST_MILLITESLA)) {
+    if (remanence != null && (remanence <= 0 || remanence > STRONGEST_MILLITESLA)) {
       cells.problem("certificate_br_mT", "lot.remanence", cells.raw("certificate_br_mT"));
     }
     return new NewLot(

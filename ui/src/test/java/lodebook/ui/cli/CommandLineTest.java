@@ -207,6 +207,15 @@ class CommandLineTest {
   }
 
   @Test
+  void historyOfAnUnknownNumberIsRefused() {
+    Shop.Said said = Shop.open(folder).run("history", "NO-1", "--json");
+    assertEquals(4, said.code());
+    assertEquals("", said.out());
+    assertEquals(
+        "lodebook: no line of the history speaks of NO-1\ntry: lodebook history\n", said.err());
+  }
+
+  @Test
   void completionNamesCommands() {
     String script = new Shop(folder).does("completion");
     assertTrue(script.contains("_picocli_lodebook_lot_import"), "no function for lot import");

@@ -90,7 +90,7 @@ class CellsTest {
   void lots() {
     check(
         "lot",
-        "17,BLK,s,02.11.2026,0,,1.3e4,\nL-1,BLK,,2026-02-30,1.5,,,\nl-1,BLK,s,2026-02-03,5,,,\n",
+        "17,BLK,s,02.11.2026,0,,1.3e4,\nL-1,BLK,,2026-02-30,1.5,,,\nl-1,BLK,s,2026-02-03,5,,x,\n",
         "a.csv:2:1: lot is \"17\", expected 1 to 40 letters, digits, '.', '_' or '-', and not digits"
             + " alone",
         "a.csv:2:10: received is \"02.11.2026\", expected a day such as 2026-11-02",
@@ -99,7 +99,8 @@ class CellsTest {
         "a.csv:3:9: supplier is empty, expected a value",
         "a.csv:3:10: received is \"2026-02-30\", expected a day such as 2026-11-02",
         "a.csv:3:21: count is \"1.5\", expected a whole number from 1",
-        "a.csv:4:1: lot l-1 stands here again after line 3, expected it once");
+        "a.csv:4:1: lot l-1 stands here again after line 3, expected it once",
+        "a.csv:4:25: certificate_br_mT is \"x\", expected a number");
   }
 
   @Test
