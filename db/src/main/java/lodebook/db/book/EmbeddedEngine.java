@@ -71,16 +71,4 @@ final class EmbeddedEngine implements Engine {
   public void beginWriting(Connection connection) throws SQLException {
     connection.setAutoCommit(false);
   }
-
-  @Override
-  public void leave(Connection connection, boolean written) throws SQLException {
-    FileSize size = new FileSize(folder);
-    if (written && size.grownTooFar()) {
-      try (Statement statement = connection.createStatement()) {
-        statement.execute("shutdown compact");
-      }
-      size.note();
-    }
-    connection.close();
-  }
 }

