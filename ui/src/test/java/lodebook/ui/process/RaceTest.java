@@ -210,6 +210,6 @@ class RaceTest {
         "%d processes of %d operations: %.1f s, file of %d kB, %d kB when compacted"
             .formatted(processes, operations, seconds, grown / 1024, compacted / 1024);
     Files.writeString(Path.of("target", "race-" + all + ".txt"), figures + "\n");
-    assertTrue(grown <= 3 * compacted + Math.min(64_000_000, all * 40_000L), figures);
+    assertTrue(grown <= 3 * compacted + Math.min(64_000_000, all * 60_000L), figures);
   }
 }
