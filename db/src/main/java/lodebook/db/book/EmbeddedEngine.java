@@ -12,8 +12,7 @@ import org.jooq.SQLDialect;
 /// H2 in this process, on a file. Whoever uses it has the [Turn].
 final class EmbeddedEngine implements Engine {
   private static final String FLAGS =
-      ";WRITE_DELAY=0;MAX_COMPACT_TIME=0;LOCK_TIMEOUT=10000;DB_CLOSE_ON_EXIT=FALSE"
-          + ";TRACE_LEVEL_FILE=0";
+      ";WRITE_DELAY=0;LOCK_TIMEOUT=10000;DB_CLOSE_ON_EXIT=FALSE" + ";TRACE_LEVEL_FILE=0";
 
   private final BookAddress.Folder folder;
   private final String url;
@@ -26,7 +25,7 @@ final class EmbeddedEngine implements Engine {
 
   /// The book of a folder, which must be there.
   static EmbeddedEngine existing(BookAddress.Folder folder) {
-    return new EmbeddedEngine(folder, "book", ";IFEXISTS=TRUE");
+    return new EmbeddedEngine(folder, "book", ";IFEXISTS=TRUE;MAX_COMPACT_TIME=0");
   }
 
   /// A database `NAME.mv.db` in a folder, made if it isn't there.
