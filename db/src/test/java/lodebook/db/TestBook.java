@@ -50,7 +50,8 @@ public enum TestBook {
     @Override
     public Connection raw(BookAddress address) throws SQLException {
       Path path = ((BookAddress.Folder) address).path();
-      return DriverManager.getConnection("jdbc:h2:" + path.resolve("book"), "sa", "");
+      return DriverManager.getConnection(
+          "jdbc:h2:" + path.resolve("book") + ";MAX_COMPACT_TIME=0", "sa", "");
     }
   },
   /// PostgreSQL, one server for all tests, a database for each book, sorted by ICU's rules.

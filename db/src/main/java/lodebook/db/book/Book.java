@@ -33,6 +33,7 @@ public final class Book implements AutoCloseable {
   private final @Nullable Turn turn;
   private final Connection connection;
   private final List<Notice> notices = new ArrayList<>();
+  private boolean written;
 
   Book(BookAddress address, Visit visit, Engine engine, @Nullable Turn turn) {
     this.address = address;
@@ -115,6 +116,7 @@ public final class Book implements AutoCloseable {
               .run(act, permission, operation, work);
       connection.commit();
       engine.settle(connection);
+      written = true;
       return result;
     } catch (SQLException failure) {
       rollback(failure);
@@ -149,6 +151,7 @@ public final class Book implements AutoCloseable {
       work.accept(Sql.on(connection, engine.dialect()));
       connection.commit();
       engine.settle(connection);
+      written = true;
     } catch (SQLException failure) {
       rollback(failure);
       throw Refusal.cannotOpen("book.not-written", address.shown(), Sql.firstLine(failure))
@@ -178,7 +181,7 @@ public final class Book implements AutoCloseable {
   @Override
   public synchronized void close() {
     try (Turn _ = turn) {
-      connection.close();
+      engine.leave(connection, written);
     } catch (SQLException failure) {
       throw new IllegalStateException(failure);
     }

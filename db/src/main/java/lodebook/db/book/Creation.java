@@ -21,7 +21,7 @@ import org.jooq.impl.DSL;
 /// half-made book never stands where a book should.
 final class Creation {
   private static final List<String> OURS =
-      List.of("turn.lock", "turn.next", "turn.who", "new.mv.db");
+      List.of("turn.lock", "turn.next", "turn.who", "new.mv.db", FileSize.NOTE);
 
   private Creation() {}
 

@@ -24,4 +24,11 @@ interface Engine {
 
   /// Prepares a connection for a write.
   void beginWriting(Connection connection) throws SQLException;
+
+  /// Closes the last connection of a visit.
+  ///
+  /// @param written whether the visit wrote anything
+  default void leave(Connection connection, boolean written) throws SQLException {
+    connection.close();
+  }
 }
