@@ -15,11 +15,16 @@ final class Annealing {
   private static final int LOGARITHMS = 4096;
 
   /// First temperature as a share of what an exchange changes in a random order on average, last as
-  /// a share of the first; tried exchanges of a run for each slot.
-  private static final double HOT = 0.1;
+  /// a share of the first.
+  private static final double HOT = 0.3;
 
-  private static final double COOLING = 1e-4;
-  private static final long STEPS_A_SLOT = 5_000;
+  private static final double COOLING = 1e-3;
+
+  /// A longer search has more runs and longer ones: tried exchanges of a run for each slot are so
+  /// many times the square root of those of the whole search for each slot.
+  private static final double LENGTH_OF_RUNS = 10;
+
+  private static final int MOST_RUNS = 1000;
 
   private final Puzzle puzzle;
   private final Start start;
@@ -65,8 +70,8 @@ final class Annealing {
   }
 
   private int runs() {
-    long each = STEPS_A_SLOT * puzzle.movable.length;
-    return Math.clamp(effort.steps() / each, 2, 1000);
+    double stepsASlot = (double) effort.steps() / puzzle.movable.length;
+    return (int) Math.clamp(Math.sqrt(stepsASlot) / LENGTH_OF_RUNS, 2, MOST_RUNS);
   }
 
   private Found anneal(int run, long steps) {

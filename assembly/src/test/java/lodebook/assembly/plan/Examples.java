@@ -27,6 +27,25 @@ final class Examples {
   static Layout layout(int polePairs, int segments, Focus focus, @Nullable String sideType) {
     double radius = polePairs * segments * 5.2e-3 / (2 * Math.PI) + 1e-3;
     double working = focus == Focus.OUT ? radius + 3e-3 : radius - 3e-3;
+    return of(polePairs, segments, focus, radius, working, "MAIN", sideType);
+  }
+
+  /// A ring of 12 slots has its centres at 10 mm, others in proportion; four magnets per pole pair.
+  ///
+  /// @param gap from the circle of the magnets' centres out to the working circle
+  static Layout layoutWithGap(int polePairs, double gap) {
+    double radius = polePairs * 4 * 10e-3 / 12;
+    return of(polePairs, 4, Focus.OUT, radius, radius + gap, "MAIN", null);
+  }
+
+  private static Layout of(
+      int polePairs,
+      int segments,
+      Focus focus,
+      double radius,
+      double working,
+      String type,
+      @Nullable String sideType) {
     return new Layout(
         "EX",
         "A",
@@ -37,7 +56,7 @@ final class Examples {
         0,
         Facing.OUT,
         radius,
-        "MAIN",
+        type,
         sideType,
         working,
         new Probe(working, 0, List.of(Spot.CENTRE), List.of(Component.RADIAL)),
@@ -49,15 +68,21 @@ final class Examples {
         0.03);
   }
 
+  /// The outer ring of the invented workshop: 16 blocks of 5 × 5 × 10 mm, focus in.
+  static RingDesign workshopOuterRing() {
+    return new RingDesign(
+        of(4, 4, Focus.IN, 20e-3, 16.5e-3, "MAIN", null), block("MAIN", 5e-3), null);
+  }
+
   /// The layout with its blocks, recoil permeability 1.
   static RingDesign design(Layout layout) {
     String side = layout.sideMagnetType();
-    return new RingDesign(layout, block("MAIN"), side == null ? null : block(side));
+    return new RingDesign(layout, block("MAIN", SIZE), side == null ? null : block(side, SIZE));
   }
 
-  private static MagnetType block(String code) {
+  private static MagnetType block(String code, double size) {
     return new MagnetType(
-        code, Shape.BLOCK, SIZE, SIZE, LENGTH, 0, 0, 0, "N42", 0.05e-3, "nickel", 1, 0);
+        code, Shape.BLOCK, size, size, LENGTH, 0, 0, 0, "N42", 0.05e-3, "nickel", 1, 0);
   }
 
   static DipoleRing ring(Layout layout) {
