@@ -165,7 +165,7 @@ final class Conclusion {
   }
 
   private List<Finding> findings(Explanation explanation) {
-    double[] right = account.rows().mean(ring.rightPolarisation());
+    double[] right = account.rows().mean(Explanation.NONE);
     double[][] covariance = account.rows().covariance(Explanation.NONE);
     List<Finding> findings = new ArrayList<>();
     for (Fault fault : explanation.faults()) {

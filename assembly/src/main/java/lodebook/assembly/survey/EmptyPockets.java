@@ -26,12 +26,7 @@ final class EmptyPockets {
     Explanation explanation = best.explanation();
     double[] polarisation = ring.polarisation(explanation);
     Cholesky factor = new Cholesky(rows.covariance(explanation));
-    double[] residual = rows.read();
-    double[] mean = rows.mean(polarisation);
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] -= mean[i];
-    }
-    double[] white = factor.whiten(residual);
+    double[] white = factor.whiten(rows.residual(explanation));
     Judge judge = new Judge(rows, priors);
     double bar = logLikelihood(best) - SPOKEN_AGAINST;
     List<Integer> slots = new ArrayList<>();

@@ -40,11 +40,10 @@ public final class ExpectedReadings {
   /// Expected readings at any points.
   public List<ExpectedReading> at(List<ProbePoint> points) {
     List<ExpectedReading> expected = new ArrayList<>();
-    double[] right = ring.rightPolarisation();
     for (ProbePoint point : points) {
       RowModel row = new RowModel(ring, List.of(row(point)));
       double sd = Math.sqrt(row.covariance(Explanation.NONE)[0][0]);
-      expected.add(new ExpectedReading(point, row.mean(right)[0], 2 * sd));
+      expected.add(new ExpectedReading(point, row.mean(Explanation.NONE)[0], 2 * sd));
     }
     return List.copyOf(expected);
   }
@@ -62,6 +61,13 @@ public final class ExpectedReadings {
   private Row row(ProbePoint point) {
     Layout layout = ring.layout();
     return new Row(
-        point, layout.probe().radiusMetres(), layout.probe().heightMetres(), 0, 0, true, meter);
+        point,
+        layout.probe().radiusMetres(),
+        layout.probe().heightMetres(),
+        0,
+        0,
+        true,
+        meter,
+        null);
   }
 }

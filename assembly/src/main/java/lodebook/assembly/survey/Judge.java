@@ -40,12 +40,7 @@ final class Judge {
   private Judged weigh(Explanation start) {
     double[] polarisation = rows.ring().polarisation(start);
     Cholesky factor = new Cholesky(rows.covariance(start));
-    double[] residual = rows.read();
-    double[] mean = rows.mean(polarisation);
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] -= mean[i];
-    }
-    double[] white = factor.whiten(residual);
+    double[] white = factor.whiten(rows.residual(start));
     double misfit = dot(white, white);
     double logWeight = -0.5 * (factor.logDeterminant() + rows.count() * LOG_TWO_PI);
     logWeight += start.logPrior(priors);

@@ -138,7 +138,8 @@ public final class ProbeDesign {
         points.stream()
             .map(
                 point ->
-                    new Row(point, probe.radiusMetres(), probe.heightMetres(), 0, 0, true, meter))
+                    new Row(
+                        point, probe.radiusMetres(), probe.heightMetres(), 0, 0, true, meter, null))
             .toList();
     return new Separations(new RowModel(ring, rows));
   }

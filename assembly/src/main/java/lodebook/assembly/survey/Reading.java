@@ -1,5 +1,6 @@
 package lodebook.assembly.survey;
 
+import java.util.Set;
 import lodebook.assembly.layout.Component;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.layout.Spot;
@@ -18,6 +19,8 @@ import org.jspecify.annotations.Nullable;
 /// @param heightMetres height of the sensing element above the middle plane, or null for the
 ///   layout's
 /// @param meter the instrument
+/// @param filled slots, from 1, that held a magnet when it was taken, or null for all that the ring
+///   has: a ring can be read while it is being filled
 public record Reading(
     int slot,
     Spot spot,
@@ -27,11 +30,54 @@ public record Reading(
     @Nullable Double temperatureCelsius,
     @Nullable Double radiusMetres,
     @Nullable Double heightMetres,
-    Meter meter) {
+    Meter meter,
+    @Nullable Set<Integer> filled) {
   public Reading {
+    filled = filled == null ? null : Set.copyOf(filled);
     if (!Double.isFinite(fluxTesla)) {
       throw new IllegalArgumentException("a reading is a number of tesla, not " + fluxTesla);
     }
+  }
+
+  /// A reading of the ring with all its magnets.
+  public Reading(
+      int slot,
+      Spot spot,
+      Component component,
+      double fluxTesla,
+      StatedUnit unit,
+      @Nullable Double temperatureCelsius,
+      @Nullable Double radiusMetres,
+      @Nullable Double heightMetres,
+      Meter meter) {
+    this(
+        slot,
+        spot,
+        component,
+        fluxTesla,
+        unit,
+        temperatureCelsius,
+        radiusMetres,
+        heightMetres,
+        meter,
+        null);
+  }
+
+  /// The same taken when only some slots held a magnet.
+  ///
+  /// @param slots their numbers, from 1
+  public Reading whenFilled(Set<Integer> slots) {
+    return new Reading(
+        slot,
+        spot,
+        component,
+        fluxTesla,
+        unit,
+        temperatureCelsius,
+        radiusMetres,
+        heightMetres,
+        meter,
+        slots);
   }
 
   /// Where the reading was taken if everything was done as set.

@@ -70,10 +70,17 @@ final class ReadingFinder {
     Probe probe = ring.layout().probe();
     Row row =
         new Row(
-            point, probe.radiusMetres(), probe.heightMetres(), 0, 0, true, new Meter("-", 0.01, 0));
+            point,
+            probe.radiusMetres(),
+            probe.heightMetres(),
+            0,
+            0,
+            true,
+            new Meter("-", 0.01, 0),
+            null);
     RowModel rows = new RowModel(ring, List.of(row));
-    double first = rows.mean(ring.polarisation(one))[0];
-    double second = rows.mean(ring.polarisation(other))[0];
+    double first = rows.mean(one)[0];
+    double second = rows.mean(other)[0];
     double variance = rows.covariance(one)[0][0] + rows.covariance(other)[0][0];
     return (first - second) * (first - second) / variance;
   }

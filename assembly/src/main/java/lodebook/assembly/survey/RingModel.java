@@ -1,5 +1,6 @@
 package lodebook.assembly.survey;
 
+import java.util.Set;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.ReadingPlace;
 import org.jspecify.annotations.Nullable;
@@ -8,11 +9,13 @@ import org.jspecify.annotations.Nullable;
 /// rule and the response of the field, kept per location.
 final class RingModel {
   private final SurveyedRing ring;
+  private final ProbeResponses whole;
   private final ProbeResponses.Filled responses;
   private final double[] polarisation;
 
   RingModel(SurveyedRing ring, ProbeResponses responses) {
     this.ring = ring;
+    this.whole = responses;
     this.responses = responses.withOnly(ring.magnets().keySet());
     this.polarisation = new double[2 * ring.layout().slots()];
     for (int slot = 1; slot <= slots(); slot++) {
@@ -67,8 +70,11 @@ final class RingModel {
     return p;
   }
 
-  ReadingResponse responseAt(ReadingPlace place) {
-    return responses.at(place);
+  /// Response of a reading.
+  ///
+  /// @param filled slots, from 1, that held a magnet then, or null for all of the ring's
+  ReadingResponse responseAt(ReadingPlace place, @Nullable Set<Integer> filled) {
+    return filled == null ? responses.at(place) : whole.withOnly(filled).at(place);
   }
 
   /// Whether every magnet that an explanation names is there.
@@ -76,10 +82,8 @@ final class RingModel {
     return explanation.faults().stream().allMatch(f -> !f.ofMagnet() || filled(f.place()));
   }
 
-  /// Response of a row to every magnet, two numbers per slot.
-  double[] fluxOf(Row row) {
-    return responseAt(
-            ReadingPlace.of(layout(), row.point(), row.radiusMetres(), row.heightMetres()))
-        .flux();
+  /// Response of a reading of the ring with all its magnets, two numbers per slot.
+  double[] fluxAt(ReadingPlace place) {
+    return responses.at(place).flux();
   }
 }

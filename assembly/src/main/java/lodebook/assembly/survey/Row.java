@@ -1,6 +1,8 @@
 package lodebook.assembly.survey;
 
+import java.util.Set;
 import lodebook.assembly.layout.ProbePoint;
+import org.jspecify.annotations.Nullable;
 
 /// A reading with the place at which it is taken to have been made.
 ///
@@ -11,6 +13,7 @@ import lodebook.assembly.layout.ProbePoint;
 /// @param kelvinAboveReference temperature above 20 °C, kelvin; 0 where unknown
 /// @param temperatureKnown whether somebody wrote the temperature down
 /// @param meter the instrument
+/// @param filled slots, from 1, that held a magnet then, or null for all of the ring's
 record Row(
     ProbePoint point,
     double radiusMetres,
@@ -18,7 +21,8 @@ record Row(
     double fluxTesla,
     double kelvinAboveReference,
     boolean temperatureKnown,
-    Meter meter) {
+    Meter meter,
+    @Nullable Set<Integer> filled) {
   /// The same reading with the probe taken to have been further from the axis.
   Row movedBy(double metres) {
     return new Row(
@@ -28,6 +32,7 @@ record Row(
         fluxTesla,
         kelvinAboveReference,
         temperatureKnown,
-        meter);
+        meter,
+        filled);
   }
 }

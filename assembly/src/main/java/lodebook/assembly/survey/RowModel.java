@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import lodebook.assembly.layout.ReadingPlace;
 import lodebook.assembly.layout.Spread;
+import lodebook.assembly.survey.RowAnswers.Of;
 
 /// Mean and covariance of a set of rows for any explanation.
 ///
@@ -16,85 +16,41 @@ import lodebook.assembly.layout.Spread;
 final class RowModel {
   private static final double UNKNOWN_TEMPERATURE_KELVIN = 3;
   private static final double LEAST_SD_TESLA = 2e-5;
-  private static final int OWN_COLUMNS = 4;
 
   private final RingModel ring;
   private final List<Row> rows;
+  private final RowAnswers answers;
+  private final double[] right;
   private final double[] read;
-  private final double[][] flux;
-  private final double[][] across;
-  private final double[][] probeOut;
-  private final double[][] probeNext;
-  private final double[][] probeUp;
-  private final double[][] magnetOut;
-  private final double[][] magnetNext;
   private final double[][] ownCovariance;
-  private final Map<String, double[]> gains = new LinkedHashMap<>();
-  private final double gainSpread;
+  private final CommonErrors common;
 
   RowModel(RingModel ring, List<Row> rows) {
-    this(ring, rows, 0);
-  }
-
-  /// @param gainSpread further relative gain error common to all rows, a standard deviation; 0 for
-  ///   none
-  RowModel(RingModel ring, List<Row> rows, double gainSpread) {
     this.ring = ring;
     this.rows = List.copyOf(rows);
-    this.gainSpread = gainSpread;
-    int count = rows.size();
-    int width = 2 * ring.slots();
+    this.answers = new RowAnswers(ring, this.rows);
+    this.right = ring.rightPolarisation();
     read = rows.stream().mapToDouble(Row::fluxTesla).toArray();
-    flux = new double[count][width];
-    across = new double[count][width];
-    probeOut = new double[count][width];
-    probeNext = new double[count][width];
-    probeUp = new double[count][width];
-    magnetOut = new double[count][width];
-    magnetNext = new double[count][width];
-    for (int i = 0; i < count; i++) {
-      fill(i);
-      Meter meter = rows.get(i).meter();
-      gains.computeIfAbsent(meter.name(), name -> new double[count])[i] = meter.accuracy();
-    }
-    ownCovariance = new double[count][];
-    for (int i = 0; i < count; i++) {
-      ownCovariance[i] = new double[i + 1];
-    }
-    double[] right = ring.rightPolarisation();
+    ownCovariance = new double[rows.size()][rows.size()];
     for (int slot = 0; slot < ring.slots(); slot++) {
-      if (ring.filled(slot)) {
-        addOwn(ownCovariance, slot, right[2 * slot], right[2 * slot + 1], 1);
-      }
+      addOwn(ownCovariance, slot, right[2 * slot], right[2 * slot + 1], 1);
     }
+    common = new CommonErrors(this);
   }
 
-  private void fill(int i) {
-    Row row = rows.get(i);
-    ReadingResponse response =
-        ring.responseAt(
-            ReadingPlace.of(ring.layout(), row.point(), row.radiusMetres(), row.heightMetres()));
-    double[][] from = {
-      response.flux(),
-      response.across(),
-      response.probeOut(),
-      response.probeNext(),
-      response.probeUp(),
-      response.magnetOut(),
-      response.magnetNext()
-    };
-    double[][] to = {
-      flux[i], across[i], probeOut[i], probeNext[i], probeUp[i], magnetOut[i], magnetNext[i]
-    };
-    for (int slot = 0; slot < ring.slots(); slot++) {
-      PlacedMagnet magnet = ring.magnet(slot);
-      double warm =
-          magnet == null ? 1 : 1 + magnet.remanencePerKelvin() * row.kelvinAboveReference();
-      for (int q = 0; q < to.length; q++) {
-        to[q][2 * slot] = warm * from[q][2 * slot];
-        to[q][2 * slot + 1] = warm * from[q][2 * slot + 1];
-      }
-    }
+  private RowModel(RowModel other, CommonErrors common) {
+    ring = other.ring;
+    rows = other.rows;
+    answers = other.answers;
+    right = other.right;
+    read = other.read;
+    ownCovariance = other.ownCovariance;
+    this.common = common;
+  }
+
+  /// The same rows with a further relative gain error common to all of them, a standard deviation.
+  RowModel withGainSpread(double gainSpread) {
+    return new RowModel(this, common.withGainSpread(gainSpread));
   }
 
   RingModel ring() {
@@ -113,37 +69,47 @@ final class RowModel {
     return read.clone();
   }
 
-  /// Expected readings, tesla.
-  double[] mean(double[] polarisation) {
-    return times(flux, polarisation);
+  /// Expected readings under an explanation, tesla.
+  double[] mean(Explanation explanation) {
+    return answers.under(Of.FLUX, explanation);
+  }
+
+  /// What was read less what an explanation expects, tesla.
+  double[] residual(Explanation explanation) {
+    double[] residual = read.clone();
+    RowAnswers.add(residual, -1, mean(explanation));
+    return residual;
   }
 
   /// Change of the readings per change of one slot's polarisation.
   double[] answer(int slot, double out, double next) {
-    double[] change = new double[rows.size()];
-    for (int i = 0; i < change.length; i++) {
-      change[i] = flux[i][2 * slot] * out + flux[i][2 * slot + 1] * next;
-    }
-    return change;
+    return answers.to(Of.FLUX, slot, out, next);
   }
 
-  double answer(int row, int column) {
-    return flux[row][column];
+  /// Responses of all rows, one line for each row, two numbers for each slot.
+  double[][] responses() {
+    double[][] lines = new double[rows.size()][2 * ring.slots()];
+    for (int c = 0; c < 2 * ring.slots(); c++) {
+      double[] column = answers.column(Of.FLUX, c);
+      for (int i = 0; i < lines.length; i++) {
+        lines[i][c] = column[i];
+      }
+    }
+    return lines;
   }
 
   /// Change of the readings per metre that the probe moves away from the axis.
-  double[] probeSlope(double[] polarisation) {
-    return times(probeOut, polarisation);
+  double[] probeSlope(Explanation explanation) {
+    return answers.under(Of.PROBE_OUT, explanation);
   }
 
-  /// Covariance of the readings under an explanation, lower triangle.
+  /// Covariance of the readings under an explanation, upper triangle.
   double[][] covariance(Explanation explanation) {
-    double[] p = ring.polarisation(explanation);
     double[][] matrix = new double[rows.size()][];
     for (int i = 0; i < matrix.length; i++) {
       matrix[i] = ownCovariance[i].clone();
     }
-    double[] right = ring.rightPolarisation();
+    double[] p = ring.polarisation(explanation);
     for (Fault fault : explanation.faults()) {
       int slot = fault.place();
       if (fault.ofMagnet() && fault.kind() != FaultKind.REVERSED) {
@@ -151,10 +117,10 @@ final class RowModel {
         addOwn(matrix, slot, p[2 * slot], p[2 * slot + 1], 1);
       }
     }
-    for (double[] column : commonColumns(p)) {
+    for (double[] column : common.columns(explanation)) {
       addOuter(matrix, column, 1);
     }
-    double[] single = singleVariances(p);
+    double[] single = singleVariances(explanation);
     for (int i = 0; i < matrix.length; i++) {
       matrix[i][i] += single[i];
     }
@@ -170,7 +136,7 @@ final class RowModel {
   /// own readings and as this one is.
   double wildVariance() {
     double largest = 1e-3;
-    for (double value : mean(ring.rightPolarisation())) {
+    for (double value : answers.right(Of.FLUX)) {
       largest = Math.max(largest, Math.abs(value));
     }
     for (double value : read) {
@@ -180,37 +146,32 @@ final class RowModel {
   }
 
   /// Variances of the rows' own errors: fresh probe position and tilt, floor.
-  double[] singleVariances(double[] polarisation) {
-    return singles(
-        times(probeOut, polarisation),
-        times(probeNext, polarisation),
-        times(probeUp, polarisation),
-        times(across, polarisation));
+  double[] singleVariances(Explanation explanation) {
+    Spread spread = ring.layout().spread();
+    double probe = spread.probeMetres() * spread.probeMetres();
+    double tilt = Math.toRadians(spread.probeTiltDegrees());
+    double[] out = answers.under(Of.PROBE_OUT, explanation);
+    double[] next = answers.under(Of.PROBE_NEXT, explanation);
+    double[] up = answers.under(Of.PROBE_UP, explanation);
+    double[] across = answers.under(Of.ACROSS, explanation);
+    double[] variances = new double[rows.size()];
+    for (int i = 0; i < variances.length; i++) {
+      double floor = rows.get(i).meter().floorTesla();
+      variances[i] =
+          probe * (out[i] * out[i] + next[i] * next[i] + up[i] * up[i])
+              + tilt * tilt * across[i] * across[i]
+              + floor * floor
+              + LEAST_SD_TESLA * LEAST_SD_TESLA;
+    }
+    return variances;
   }
 
-  /// Like [#singleVariances] but the largest that any one reversed magnet makes of it.
-  double[] largestSingleVariances(double[] polarisation) {
-    double[][] all = {
-      times(probeOut, polarisation),
-      times(probeNext, polarisation),
-      times(probeUp, polarisation),
-      times(across, polarisation)
-    };
-    double[][][] responses = {probeOut, probeNext, probeUp, across};
-    double[] largest = singles(all[0], all[1], all[2], all[3]);
+  /// Like [#singleVariances] of a right ring but the largest that any one reversed magnet makes of
+  /// it.
+  double[] largestSingleVariances() {
+    double[] largest = singleVariances(Explanation.NONE);
     for (int slot = 0; slot < ring.slots(); slot++) {
-      double[][] turned = new double[4][rows.size()];
-      for (int q = 0; q < 4; q++) {
-        for (int i = 0; i < rows.size(); i++) {
-          double[] line = responses[q][i];
-          turned[q][i] =
-              all[q][i]
-                  - 2
-                      * (line[2 * slot] * polarisation[2 * slot]
-                          + line[2 * slot + 1] * polarisation[2 * slot + 1]);
-        }
-      }
-      double[] here = singles(turned[0], turned[1], turned[2], turned[3]);
+      double[] here = singleVariances(Explanation.NONE.with(Fault.of(slot, FaultKind.REVERSED)));
       for (int i = 0; i < here.length; i++) {
         largest[i] = Math.max(largest[i], here[i]);
       }
@@ -218,102 +179,20 @@ final class RowModel {
     return largest;
   }
 
-  private double[] singles(double[] radial, double[] tangential, double[] axial, double[] other) {
-    Spread spread = ring.layout().spread();
-    double probe = spread.probeMetres() * spread.probeMetres();
-    double tilt = Math.toRadians(spread.probeTiltDegrees());
-    double[] variances = new double[rows.size()];
-    for (int i = 0; i < variances.length; i++) {
-      double floor = rows.get(i).meter().floorTesla();
-      variances[i] =
-          probe * (radial[i] * radial[i] + tangential[i] * tangential[i] + axial[i] * axial[i])
-              + tilt * tilt * other[i] * other[i]
-              + floor * floor
-              + LEAST_SD_TESLA * LEAST_SD_TESLA;
-    }
-    return variances;
-  }
-
   private void addOwn(double[][] matrix, int slot, double out, double next, int sign) {
     PlacedMagnet magnet = ring.magnet(slot);
     if (magnet == null) {
       return;
     }
-    for (double[] column : ownColumns(slot, magnet, out, next)) {
-      addOuter(matrix, column, sign);
-    }
-  }
-
-  private double[][] ownColumns(int slot, PlacedMagnet magnet, double out, double next) {
     Spread spread = ring.layout().spread();
     double strength =
         magnet.strength().standardUncertaintyTesla() / magnet.strength().remanenceTesla();
     double facing = Math.toRadians(spread.facingDegrees());
     double pocket = spread.pocketMetres();
-    double[][] columns = new double[OWN_COLUMNS][rows.size()];
-    int a = 2 * slot;
-    int b = a + 1;
-    for (int i = 0; i < rows.size(); i++) {
-      columns[0][i] = strength * (flux[i][a] * out + flux[i][b] * next);
-      columns[1][i] = facing * (flux[i][b] * out - flux[i][a] * next);
-      columns[2][i] = pocket * (magnetOut[i][a] * out + magnetOut[i][b] * next);
-      columns[3][i] = pocket * (magnetNext[i][a] * out + magnetNext[i][b] * next);
-    }
-    return columns;
-  }
-
-  private List<double[]> commonColumns(double[] p) {
-    double[] mean = mean(p);
-    List<double[]> columns = new ArrayList<>();
-    for (double[] gain : gains.values()) {
-      columns.add(product(mean, gain));
-    }
-    if (gainSpread > 0) {
-      double[] column = mean.clone();
-      for (int i = 0; i < column.length; i++) {
-        column[i] *= gainSpread;
-      }
-      columns.add(column);
-    }
-    Map<String, double[]> shared = new LinkedHashMap<>();
-    double[] warm = new double[mean.length];
-    boolean unknown = rows.stream().anyMatch(row -> !row.temperatureKnown());
-    for (int slot = 0; slot < ring.slots(); slot++) {
-      PlacedMagnet magnet = ring.magnet(slot);
-      if (magnet == null) {
-        continue;
-      }
-      SharedDoubt doubt = magnet.shared();
-      if (!unknown && doubt == null) {
-        continue;
-      }
-      double[] own = answer(slot, p[2 * slot], p[2 * slot + 1]);
-      for (int i = 0; i < own.length; i++) {
-        if (!rows.get(i).temperatureKnown()) {
-          warm[i] += own[i] * magnet.remanencePerKelvin() * UNKNOWN_TEMPERATURE_KELVIN;
-        }
-      }
-      if (doubt != null) {
-        double share = doubt.standardUncertaintyTesla() / magnet.strength().remanenceTesla();
-        double[] column = shared.computeIfAbsent(doubt.name(), n -> new double[own.length]);
-        for (int i = 0; i < own.length; i++) {
-          column[i] += own[i] * share;
-        }
-      }
-    }
-    if (unknown) {
-      columns.add(warm);
-    }
-    columns.addAll(shared.values());
-    return columns;
-  }
-
-  private static double[] product(double[] left, double[] right) {
-    double[] result = new double[left.length];
-    for (int i = 0; i < result.length; i++) {
-      result[i] = left[i] * right[i];
-    }
-    return result;
+    addOuter(matrix, answers.to(Of.FLUX, slot, strength * out, strength * next), sign);
+    addOuter(matrix, answers.to(Of.FLUX, slot, -facing * next, facing * out), sign);
+    addOuter(matrix, answers.to(Of.MAGNET_OUT, slot, pocket * out, pocket * next), sign);
+    addOuter(matrix, answers.to(Of.MAGNET_NEXT, slot, pocket * out, pocket * next), sign);
   }
 
   private static void addOuter(double[][] matrix, double[] column, int sign) {
@@ -323,22 +202,101 @@ final class RowModel {
         continue;
       }
       double[] line = matrix[i];
-      for (int j = 0; j <= i; j++) {
+      for (int j = i; j < line.length; j++) {
         line[j] += factor * column[j];
       }
     }
   }
 
-  private static double[] times(double[][] matrix, double[] vector) {
-    double[] result = new double[matrix.length];
-    for (int i = 0; i < result.length; i++) {
-      double[] line = matrix[i];
-      double sum = 0;
-      for (int j = 0; j < vector.length; j++) {
-        sum += line[j] * vector[j];
+  /// Errors that many rows share: meter gains, an unknown temperature, doubts about whole lots.
+  private static final class CommonErrors {
+    private final RowModel model;
+    private final double gainSpread;
+    private final Map<String, double[]> gains;
+    private final boolean unknownTemperature;
+    private final double[] warm;
+    private final Map<String, double[]> shared;
+
+    CommonErrors(RowModel model) {
+      this.model = model;
+      gainSpread = 0;
+      gains = new LinkedHashMap<>();
+      for (int i = 0; i < model.count(); i++) {
+        Meter meter = model.rows.get(i).meter();
+        gains.computeIfAbsent(meter.name(), name -> new double[model.count()])[i] =
+            meter.accuracy();
       }
-      result[i] = sum;
+      unknownTemperature = model.rows.stream().anyMatch(row -> !row.temperatureKnown());
+      warm = new double[model.count()];
+      shared = new LinkedHashMap<>();
+      for (int slot = 0; slot < model.ring.slots(); slot++) {
+        add(slot, model.right[2 * slot], model.right[2 * slot + 1], warm, shared);
+      }
     }
-    return result;
+
+    private CommonErrors(CommonErrors other, double gainSpread) {
+      this.gainSpread = gainSpread;
+      model = other.model;
+      gains = other.gains;
+      unknownTemperature = other.unknownTemperature;
+      warm = other.warm;
+      shared = other.shared;
+    }
+
+    CommonErrors withGainSpread(double spread) {
+      return new CommonErrors(this, spread);
+    }
+
+    List<double[]> columns(Explanation explanation) {
+      double[] mean = model.mean(explanation);
+      List<double[]> columns = new ArrayList<>();
+      for (double[] gain : gains.values()) {
+        double[] column = mean.clone();
+        for (int i = 0; i < column.length; i++) {
+          column[i] *= gain[i];
+        }
+        columns.add(column);
+      }
+      if (gainSpread > 0) {
+        double[] column = new double[mean.length];
+        RowAnswers.add(column, gainSpread, mean);
+        columns.add(column);
+      }
+      double[] warmHere = warm.clone();
+      Map<String, double[]> sharedHere = new LinkedHashMap<>();
+      shared.forEach((name, column) -> sharedHere.put(name, column.clone()));
+      for (Fault fault : explanation.faults()) {
+        if (fault.ofMagnet()) {
+          double[] change = fault.change(model.right);
+          add(fault.place(), change[0], change[1], warmHere, sharedHere);
+        }
+      }
+      if (unknownTemperature) {
+        columns.add(warmHere);
+      }
+      columns.addAll(sharedHere.values());
+      return columns;
+    }
+
+    private void add(
+        int slot, double out, double next, double[] warmTo, Map<String, double[]> sharedTo) {
+      PlacedMagnet magnet = model.ring.magnet(slot);
+      if (magnet == null || (!unknownTemperature && magnet.shared() == null)) {
+        return;
+      }
+      double[] own = model.answer(slot, out, next);
+      if (unknownTemperature) {
+        double perKelvin = magnet.remanencePerKelvin() * UNKNOWN_TEMPERATURE_KELVIN;
+        for (int i = 0; i < own.length; i++) {
+          warmTo[i] += model.rows.get(i).temperatureKnown() ? 0 : perKelvin * own[i];
+        }
+      }
+      SharedDoubt doubt = magnet.shared();
+      if (doubt != null) {
+        double share = doubt.standardUncertaintyTesla() / magnet.strength().remanenceTesla();
+        RowAnswers.add(
+            sharedTo.computeIfAbsent(doubt.name(), n -> new double[own.length]), share, own);
+      }
+    }
   }
 }

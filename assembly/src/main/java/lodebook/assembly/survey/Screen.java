@@ -2,7 +2,6 @@ package lodebook.assembly.survey;
 
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.BitSet;
 import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
@@ -30,6 +29,8 @@ final class Screen {
   private final double[] residual;
   private final double[] inverseDiagonal;
   private final double company;
+  private final boolean[] reversed;
+  private final int[] places;
 
   Screen(RowModel rows, Cholesky factor, Priors priors) {
     this.rows = rows;
@@ -41,48 +42,39 @@ final class Screen {
       faults.addAll(Possible.of(ring, slot));
     }
     double[] right = ring.rightPolarisation();
-    double[] mean = rows.mean(right);
-    residual = rows.read();
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] -= mean[i];
-    }
+    residual = rows.residual(Explanation.NONE);
     inverseDiagonal = factor.inverseDiagonal();
     int width = 2 * ring.slots();
-    double[][] white = new double[rows.count()][width];
-    for (int i = 0; i < white.length; i++) {
-      for (int c = 0; c < width; c++) {
-        white[i][c] = rows.answer(i, c);
-      }
-    }
+    double[][] white = rows.responses();
     factor.whitenAll(white);
     double[][] product = new double[width][width];
     double[] against = new double[width];
     double[] whiteResidual = factor.whiten(residual);
     for (int i = 0; i < white.length; i++) {
       double[] line = white[i];
+      RowAnswers.add(against, whiteResidual[i], line);
       for (int c = 0; c < width; c++) {
-        double value = line[c];
-        against[c] += value * whiteResidual[i];
-        double[] target = product[c];
-        for (int d = 0; d < width; d++) {
-          target[d] += value * line[d];
-        }
+        RowAnswers.add(product[c], line[c], line);
       }
     }
     double[][] change = new double[faults.size()][];
+    reversed = new boolean[change.length];
+    places = new int[change.length];
     for (int e = 0; e < change.length; e++) {
       change[e] = faults.get(e).change(right);
+      reversed[e] = faults.get(e).kind() == FaultKind.REVERSED;
+      places[e] = faults.get(e).place();
     }
     alone = new double[change.length];
     overlap = new double[change.length][change.length];
     for (int e = 0; e < change.length; e++) {
-      int at = 2 * faults.get(e).place();
+      int at = 2 * places[e];
+      double[] shifted = new double[width];
+      RowAnswers.add(shifted, change[e][0], product[at]);
+      RowAnswers.add(shifted, change[e][1], product[at + 1]);
       for (int f = 0; f < change.length; f++) {
-        int to = 2 * faults.get(f).place();
-        overlap[e][f] =
-            change[e][0] * (product[at][to] * change[f][0] + product[at][to + 1] * change[f][1])
-                + change[e][1]
-                    * (product[at + 1][to] * change[f][0] + product[at + 1][to + 1] * change[f][1]);
+        int to = 2 * places[f];
+        overlap[e][f] = shifted[to] * change[f][0] + shifted[to + 1] * change[f][1];
       }
       alone[e] =
           logPrior(faults.get(e))
@@ -104,7 +96,11 @@ final class Screen {
   }
 
   /// The likeliest explanations, likeliest first; the ring being right is always among them.
-  List<Explanation> likeliest(int count) {
+  ///
+  /// @param least how many at least, even where they are far less likely than the first
+  /// @param most how many at most
+  /// @param within natural logarithm of how many times less likely than the first they may be
+  List<Explanation> likeliest(int least, int most, double within) {
     List<Best.Scored<int[]>> ranked = new ArrayList<>();
     ranked.add(new Best.Scored<>(0, new int[0]));
     List<Best.Scored<int[]>> level = ranked;
@@ -117,24 +113,31 @@ final class Screen {
     int rank = 0;
     int singles = 0;
     for (Best.Scored<int[]> scored : ranked) {
+      boolean small =
+          scored.what().length == 0 || (scored.what().length == 1 && singles++ < SUSPECTS_FROM);
+      boolean leading = rank++ < 2 * most;
+      if (!small && !leading) {
+        continue;
+      }
       Explanation explanation =
           new Explanation(Arrays.stream(scored.what()).mapToObj(faults::get).toList());
       found.add(new Best.Scored<>(scored.score(), explanation));
-      boolean small =
-          scored.what().length == 0 || (scored.what().length == 1 && singles++ < SUSPECTS_FROM);
-      if (small || rank++ < SUSPECTS_FROM) {
+      if (small || rank <= SUSPECTS_FROM) {
         found.addAll(withSuspects(scored, explanation));
       }
     }
     found.sort(Comparator.comparingDouble((Best.Scored<Explanation> s) -> -s.score()));
-    return different(found, count);
+    return different(found, least, most, within);
   }
 
-  private static List<Explanation> different(List<Best.Scored<Explanation>> found, int count) {
+  private static List<Explanation> different(
+      List<Best.Scored<Explanation>> found, int least, int most, double within) {
+    double bar = found.getFirst().score() - within;
     List<Explanation> list = new ArrayList<>();
     Set<List<NamedFault>> seen = new HashSet<>();
     for (Best.Scored<Explanation> scored : found) {
-      if (list.size() < count && seen.add(scored.what().key())) {
+      int wanted = scored.score() > bar ? most : least;
+      if (list.size() < wanted && seen.add(scored.what().key())) {
         list.add(scored.what());
       }
     }
@@ -146,13 +149,15 @@ final class Screen {
 
   private List<Best.Scored<int[]>> pairs() {
     Best<int[]> best = new Best<>(GROWN_FROM);
+    double[] gain = new double[alone.length];
     for (int e = 0; e < alone.length; e++) {
-      double[] line = overlap[e];
-      int place = faults.get(e).place();
-      for (int f = e + 1; f < alone.length; f++) {
-        double score = alone[e] + alone[f] - line[f] + inCompany(e, f);
-        if (score > best.bar() && faults.get(f).place() != place) {
-          best.offer(score, new int[] {e, f});
+      int[] one = {e};
+      gainsBeside(one, gain);
+      double bar = best.bar() - alone[e];
+      for (int f = e + 1; f < gain.length; f++) {
+        if (gain[f] > bar && free(one, f)) {
+          best.offer(alone[e] + gain[f], new int[] {e, f});
+          bar = best.bar() - alone[e];
         }
       }
     }
@@ -161,26 +166,19 @@ final class Screen {
 
   private List<Best.Scored<int[]>> grown(List<Best.Scored<int[]>> from) {
     Best<int[]> best = new Best<>(GROWN_FROM);
-    Set<BitSet> seen = new HashSet<>();
+    Set<Long> seen = new HashSet<>();
+    double[] gain = new double[alone.length];
     for (Best.Scored<int[]> scored : from) {
       int[] members = scored.what();
-      for (int e = 0; e < alone.length; e++) {
-        double score = scored.score() + alone[e];
-        boolean among = false;
-        for (int member : members) {
-          score -= overlap[member][e];
-          among |= reversed(member);
-        }
-        score += among && reversed(e) ? company : 0;
-        if (score > best.bar() && free(members, e)) {
+      gainsBeside(members, gain);
+      double bar = best.bar() - scored.score();
+      for (int e = 0; e < gain.length; e++) {
+        if (gain[e] > bar && free(members, e)) {
           int[] more = Arrays.copyOf(members, members.length + 1);
           more[members.length] = e;
-          BitSet key = new BitSet();
-          for (int member : more) {
-            key.set(member);
-          }
-          if (seen.add(key)) {
-            best.offer(score, more);
+          if (seen.add(key(more))) {
+            best.offer(scored.score() + gain[e], more);
+            bar = best.bar() - scored.score();
           }
         }
       }
@@ -188,17 +186,33 @@ final class Screen {
     return best.sorted();
   }
 
-  private double inCompany(int one, int other) {
-    return reversed(one) && reversed(other) ? company : 0;
+  /// What every fault adds to the score of others.
+  private void gainsBeside(int[] members, double[] gain) {
+    System.arraycopy(alone, 0, gain, 0, gain.length);
+    boolean among = false;
+    for (int member : members) {
+      RowAnswers.add(gain, -1, overlap[member]);
+      among |= reversed[member];
+    }
+    for (int e = 0; e < gain.length; e++) {
+      gain[e] += among && reversed[e] ? company : 0;
+    }
   }
 
-  private boolean reversed(int index) {
-    return faults.get(index).kind() == FaultKind.REVERSED;
+  /// One number for a set of at most four faults, whatever their order.
+  private static long key(int[] members) {
+    int[] ordered = members.clone();
+    Arrays.sort(ordered);
+    long key = 0;
+    for (int member : ordered) {
+      key = (key << 16) + member + 1;
+    }
+    return key;
   }
 
   private boolean free(int[] members, int candidate) {
     for (int member : members) {
-      if (faults.get(member).place() == faults.get(candidate).place()) {
+      if (places[member] == places[candidate]) {
         return false;
       }
     }

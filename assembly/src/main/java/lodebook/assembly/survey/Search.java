@@ -11,8 +11,12 @@ import java.util.Map;
 /// The first screening uses the plan's covariance, widened where a reversed magnet would widen it;
 /// each later one that of the likeliest explanation found so far, until that no longer changes.
 final class Search {
-  private static final int FIRST = 30;
-  private static final int LATER = 20;
+  private static final int FIRST_LEAST = 12;
+  private static final int FIRST_MOST = 30;
+  private static final double FIRST_WITHIN = 30;
+  private static final int LATER_LEAST = 6;
+  private static final int LATER_MOST = 20;
+  private static final double LATER_WITHIN = 12;
   private static final int ROUNDS = 5;
   private static final double NAMED_FROM = Math.log(20);
 
@@ -22,7 +26,7 @@ final class Search {
   static List<Judged> explain(RowModel rows, Priors priors) {
     Judge judge = new Judge(rows, priors);
     Map<List<NamedFault>, Judged> weighed = new HashMap<>();
-    Judged best = weigh(judge, screening(rows), rows, priors, FIRST, weighed);
+    Judged best = weigh(judge, screening(rows), rows, priors, weighed);
     for (int round = 1; round < ROUNDS; round++) {
       Judged next = weighRound(judge, best.explanation(), rows, priors, weighed);
       if (next.explanation().key().equals(best.explanation().key())) {
@@ -60,9 +64,10 @@ final class Search {
       Cholesky factor,
       RowModel rows,
       Priors priors,
-      int count,
       Map<List<NamedFault>, Judged> weighed) {
-    for (Explanation explanation : new Screen(rows, factor, priors).likeliest(count)) {
+    List<Explanation> screened =
+        new Screen(rows, factor, priors).likeliest(FIRST_LEAST, FIRST_MOST, FIRST_WITHIN);
+    for (Explanation explanation : screened) {
       weighed.computeIfAbsent(explanation.key(), key -> judge.judge(explanation));
     }
     return sorted(weighed).getFirst();
@@ -78,7 +83,9 @@ final class Search {
       Map<List<NamedFault>, Judged> weighed) {
     Cholesky own = new Cholesky(rows.covariance(best));
     List<Fault> suspects = best.faults().stream().filter(f -> !f.ofMagnet()).toList();
-    for (Explanation screened : new Screen(rows, own, priors).likeliest(LATER)) {
+    List<Explanation> all =
+        new Screen(rows, own, priors).likeliest(LATER_LEAST, LATER_MOST, LATER_WITHIN);
+    for (Explanation screened : all) {
       weighed.computeIfAbsent(screened.key(), key -> judge.judge(screened));
       if (!suspects.isEmpty()) {
         Explanation with = screened.ofMagnets().withAll(suspects);
@@ -96,10 +103,9 @@ final class Search {
 
   /// Covariance for the first screening.
   static Cholesky screening(RowModel rows) {
-    double[] right = rows.ring().rightPolarisation();
     double[][] matrix = rows.covariance(Explanation.NONE);
-    double[] plan = rows.singleVariances(right);
-    double[] wide = rows.largestSingleVariances(right);
+    double[] plan = rows.singleVariances(Explanation.NONE);
+    double[] wide = rows.largestSingleVariances();
     for (int i = 0; i < matrix.length; i++) {
       matrix[i][i] += 0.5 * (wide[i] - plan[i]);
     }

@@ -11,12 +11,7 @@ final class Separations {
   Separations(RowModel rows) {
     right = rows.ring().rightPolarisation();
     int width = right.length;
-    double[][] white = new double[rows.count()][width];
-    for (int i = 0; i < white.length; i++) {
-      for (int c = 0; c < width; c++) {
-        white[i][c] = rows.answer(i, c);
-      }
-    }
+    double[][] white = rows.responses();
     Search.screening(rows).whitenAll(white);
     product = new double[width][width];
     for (double[] line : white) {

@@ -48,34 +48,34 @@ record Slip(Measuring measuring, boolean tangentialTurned) {
     return Math.floorMod(opposite() ? -steps : steps, slots) + 1;
   }
 
-  /// The reading as it was really taken.
-  Row row(Reading reading, Layout layout) {
-    int slots = layout.slots();
-    int slot = realSlot(reading.slot(), slots);
+  /// Where a reading was really taken.
+  ProbePoint realPoint(Reading reading, Layout layout) {
+    int slot = realSlot(reading.slot(), layout.slots());
     if (opposite() && reading.spot() == Spot.TO_NEXT) {
       slot = layout.previous(slot);
     }
+    return new ProbePoint(slot, reading.spot(), reading.component());
+  }
+
+  /// The reading as it was really taken.
+  Row row(Reading reading, Layout layout) {
     Double radius = reading.radiusMetres();
     Double height = reading.heightMetres();
     Double temperature = reading.temperatureCelsius();
     return new Row(
-        new ProbePoint(slot, reading.spot(), reading.component()),
+        realPoint(reading, layout),
         radius == null ? layout.probe().radiusMetres() : radius,
         height == null ? layout.probe().heightMetres() : height,
-        freed(reading),
+        reading.fluxTesla() * freeing(reading.component()),
         temperature == null ? 0 : temperature - 20,
         temperature != null,
-        reading.meter());
+        reading.meter(),
+        reading.filled());
   }
 
-  /// A value as written, freed of the slip, tesla.
-  double freed(Reading reading) {
-    return reading.fluxTesla() * freeing(reading);
-  }
-
-  /// Factor that frees a value as written from the slip.
-  double freeing(Reading reading) {
-    boolean turned = tangentialTurned && reading.component() == Component.TANGENTIAL;
+  /// Factor that frees a value of a component as written from the slip.
+  double freeing(Component component) {
+    boolean turned = tangentialTurned && component == Component.TANGENTIAL;
     boolean inverted = measuring.sign() == Measuring.Sign.INVERTED;
     return (turned == inverted ? 1 : -1) / unitFactor();
   }

@@ -4,12 +4,11 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import lodebook.assembly.layout.Component;
+import lodebook.assembly.survey.Courses.Course;
 
 /// Expected readings under every slip that a ring allows, compared with the readings quickly.
 final class SlipCandidates {
-  /// Where rows were really taken; slips that differ in sign or unit share it.
-  private record Course(int startSlot, Measuring.Direction direction) {}
-
   /// A slip with the explanation as it looks under it.
   ///
   /// @param written expected values as they would be written down under the slip, tesla
@@ -19,29 +18,34 @@ final class SlipCandidates {
 
   private final RingModel ring;
   private final List<Reading> readings;
-  private final Map<Course, double[][]> responses = new HashMap<>();
+  private final Courses courses;
+  private final List<Slip> slips;
+  private final boolean[] tangential;
 
   SlipCandidates(RingModel ring, List<Reading> readings) {
     this.ring = ring;
     this.readings = readings;
+    this.courses = new Courses(ring, readings);
+    this.slips = Slip.all(ring.slots());
+    tangential = new boolean[readings.size()];
+    for (int i = 0; i < tangential.length; i++) {
+      tangential[i] = readings.get(i).component() == Component.TANGENTIAL;
+    }
   }
 
   /// Images of an explanation that was found under one slip, under every other that leaves less
   /// than a share of the readings' energy unexplained.
   List<Candidate> like(Slip from, Explanation explanation, double share) {
     List<Candidate> candidates = new ArrayList<>();
-    Map<Course, double[]> means = new HashMap<>();
-    for (Slip slip : Slip.all(ring.slots())) {
+    for (Slip slip : slips) {
       Explanation image = from.image(explanation, slip, ring.slots());
       if (!ring.holds(image)) {
         continue;
       }
-      double[] mean =
-          means.computeIfAbsent(
-              course(slip), course -> times(response(slip), ring.polarisation(image)));
-      Candidate candidate = candidate(slip, image, mean);
-      if (candidate.leftOver() < share) {
-        candidates.add(candidate);
+      double[] mean = mean(courses.of(slip), image);
+      double left = leftOver(slip, mean);
+      if (left < share) {
+        candidates.add(new Candidate(slip, image, written(slip, mean), left));
       }
     }
     return candidates;
@@ -50,130 +54,87 @@ final class SlipCandidates {
   /// Every single fault under every slip but none, where it leaves less than a share of the energy
   /// unexplained.
   ///
-  /// @param before share that may be unexplained without the fault
-  /// @param after share that may be unexplained with it
-  List<Candidate> withOneFault(double before, double after) {
+  /// Slips that leave so much without a fault that none could mend it are passed over: with the
+  /// mean m, what is left r and the change d of a fault, |r| ≤ |d| + √share·(|m| + |d|) is needed.
+  ///
+  /// @param share share that may be unexplained with the fault
+  List<Candidate> withOneFault(double share) {
     List<Candidate> candidates = new ArrayList<>();
     double[] right = ring.rightPolarisation();
-    double[] changed = new double[readings.size()];
     List<Fault> possible = new ArrayList<>();
     for (int slot = 0; slot < ring.slots(); slot++) {
       possible.addAll(Possible.of(ring, slot));
     }
-    for (Candidate without : like(Slip.NONE, Explanation.NONE, before)) {
-      if (without.slip().equals(Slip.NONE)) {
+    double[][] changes = new double[possible.size()][];
+    for (int f = 0; f < changes.length; f++) {
+      changes[f] = possible.get(f).change(right);
+    }
+    double most = 0;
+    for (int f = 0; f < changes.length; f++) {
+      most = Math.max(most, courses.mostEnergy(possible.get(f).place(), changes[f]));
+    }
+    Map<Course, SingleFaultEnergies> energies = new HashMap<>();
+    for (Slip slip : slips) {
+      Course course = courses.of(slip);
+      double energy = Judge.dot(course.mean(), course.mean());
+      double change = Math.sqrt(most / energy);
+      double mendable = change + Math.sqrt(share) * (1 + change);
+      if (slip.equals(Slip.NONE) || !(leftOver(slip, course.mean()) < mendable * mendable)) {
         continue;
       }
-      double[][] response = response(without.slip());
-      double[] mean = times(response, right);
-      Sums sums = new Sums(response, mean, freed(without.slip()));
-      for (Fault fault : possible) {
-        double[] change = fault.change(right);
-        if (sums.leftOver(fault.place(), change) < after) {
-          int at = 2 * fault.place();
-          for (int i = 0; i < mean.length; i++) {
-            changed[i] = mean[i] + response[i][at] * change[0] + response[i][at + 1] * change[1];
-          }
-          candidates.add(candidate(without.slip(), Explanation.NONE.with(fault), changed));
+      SingleFaultEnergies sums =
+          energies.computeIfAbsent(course, c -> new SingleFaultEnergies(c, readings));
+      SingleFaultEnergies.Rest rest =
+          sums.rest(slip.freeing(Component.RADIAL), slip.freeing(Component.TANGENTIAL));
+      for (int f = 0; f < changes.length; f++) {
+        double left = rest.leftOver(possible.get(f).place(), changes[f]);
+        if (left < share) {
+          Explanation explanation = Explanation.NONE.with(possible.get(f));
+          candidates.add(
+              new Candidate(slip, explanation, written(slip, mean(course, explanation)), left));
         }
       }
     }
     return candidates;
   }
 
-  /// Inner products from which the energies with any one fault follow.
-  private static final class Sums {
-    private final double[] byMean;
-    private final double[] byRest;
-    private final double[] squares;
-    private final double[] crossed;
-    private final double energy;
-    private final double rest;
-
-    Sums(double[][] response, double[] mean, double[] freed) {
-      int width = response[0].length;
-      byMean = new double[width];
-      byRest = new double[width];
-      squares = new double[width];
-      crossed = new double[width / 2];
-      double meanSquare = 0;
-      double restSquare = 0;
-      for (int i = 0; i < mean.length; i++) {
-        double[] line = response[i];
-        double m = mean[i];
-        double r = freed[i] - m;
-        meanSquare += m * m;
-        restSquare += r * r;
-        for (int c = 0; c < width; c++) {
-          byMean[c] += line[c] * m;
-          byRest[c] += line[c] * r;
-          squares[c] += line[c] * line[c];
-        }
-        for (int slot = 0; slot < crossed.length; slot++) {
-          crossed[slot] += line[2 * slot] * line[2 * slot + 1];
+  private double[] mean(Course course, Explanation explanation) {
+    if (explanation.namesNoMagnet()) {
+      return course.mean();
+    }
+    double[] right = ring.rightPolarisation();
+    double[] mean = course.mean().clone();
+    for (Fault fault : explanation.faults()) {
+      if (fault.ofMagnet()) {
+        double[] change = fault.change(right);
+        int at = 2 * fault.place();
+        for (int i = 0; i < mean.length; i++) {
+          double[] line = course.lines()[i];
+          mean[i] += line[at] * change[0] + line[at + 1] * change[1];
         }
       }
-      energy = meanSquare;
-      rest = restSquare;
     }
-
-    double leftOver(int slot, double[] change) {
-      int a = 2 * slot;
-      int b = a + 1;
-      double square =
-          change[0] * change[0] * squares[a]
-              + 2 * change[0] * change[1] * crossed[slot]
-              + change[1] * change[1] * squares[b];
-      double whole = energy + 2 * (change[0] * byMean[a] + change[1] * byMean[b]) + square;
-      double left = rest - 2 * (change[0] * byRest[a] + change[1] * byRest[b]) + square;
-      return whole > 0 ? left / whole : Double.POSITIVE_INFINITY;
-    }
+    return mean;
   }
 
-  private double[] freed(Slip slip) {
-    double[] freed = new double[readings.size()];
-    for (int i = 0; i < freed.length; i++) {
-      freed[i] = slip.freed(readings.get(i));
-    }
-    return freed;
-  }
-
-  private Candidate candidate(Slip slip, Explanation explanation, double[] mean) {
+  private double leftOver(Slip slip, double[] mean) {
+    double radial = slip.freeing(Component.RADIAL);
+    double along = slip.freeing(Component.TANGENTIAL);
     double energy = 0;
     double left = 0;
-    double[] written = new double[mean.length];
     for (int i = 0; i < mean.length; i++) {
-      Reading reading = readings.get(i);
-      double freed = slip.freed(reading);
-      written[i] = mean[i] / slip.freeing(reading);
+      double freed = readings.get(i).fluxTesla() * (tangential[i] ? along : radial);
       energy += mean[i] * mean[i];
       left += (freed - mean[i]) * (freed - mean[i]);
     }
-    double share = energy > 0 ? left / energy : Double.POSITIVE_INFINITY;
-    return new Candidate(slip, explanation, written, share);
+    return energy > 0 ? left / energy : Double.POSITIVE_INFINITY;
   }
 
-  private double[][] response(Slip slip) {
-    return responses.computeIfAbsent(
-        course(slip),
-        course -> {
-          double[][] lines = new double[readings.size()][];
-          for (int i = 0; i < lines.length; i++) {
-            lines[i] = ring.fluxOf(slip.row(readings.get(i), ring.layout()));
-          }
-          return lines;
-        });
-  }
-
-  private static Course course(Slip slip) {
-    return new Course(slip.measuring().startSlot(), slip.measuring().direction());
-  }
-
-  private static double[] times(double[][] matrix, double[] vector) {
-    double[] result = new double[matrix.length];
-    for (int i = 0; i < result.length; i++) {
-      result[i] = Judge.dot(matrix[i], vector);
+  private double[] written(Slip slip, double[] mean) {
+    double[] written = new double[mean.length];
+    for (int i = 0; i < mean.length; i++) {
+      written[i] = mean[i] / slip.freeing(readings.get(i).component());
     }
-    return result;
+    return written;
   }
 }

@@ -15,7 +15,6 @@ final class Slips {
   private static final double EQUAL = Math.log(20);
   private static final double AS_SET_WINS_BY = Math.log(1000);
   private static final double ROUGHLY_LIKE = 0.1;
-  private static final double WITH_A_FAULT = 2;
   private static final int STRAINED_FAULTS = 3;
   private static final double STRAINED_FIT = 1e-3;
   private static final int WEIGHED = 12;
@@ -44,7 +43,7 @@ final class Slips {
     List<Candidate> promising =
         new ArrayList<>(candidates.like(Slip.NONE, Explanation.NONE, ROUGHLY_LIKE));
     if (isStrained(plain)) {
-      promising.addAll(candidates.withOneFault(WITH_A_FAULT, ROUGHLY_LIKE));
+      promising.addAll(candidates.withOneFault(ROUGHLY_LIKE));
     }
     Tried slipped = likeliest(promising);
     if (slipped != null
@@ -139,7 +138,7 @@ final class Slips {
     double logWeight(Candidate candidate) {
       double[] residual = rows.read();
       for (int i = 0; i < residual.length; i++) {
-        residual[i] -= candidate.written()[i] * slip.freeing(readings.get(i));
+        residual[i] -= candidate.written()[i] * slip.freeing(readings.get(i).component());
       }
       double[] white = factor.whiten(residual);
       return judged.logWeight() + 0.5 * (judged.misfit() - Judge.dot(white, white));

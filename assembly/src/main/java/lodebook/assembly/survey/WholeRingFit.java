@@ -25,7 +25,7 @@ final class WholeRingFit {
   WholeRingFit(Account account, Priors priors) {
     this.account = account;
     this.priors = priors;
-    this.free = new RowModel(account.rows().ring(), account.rows().rows(), FREE_GAIN);
+    this.free = account.rows().withGainSpread(FREE_GAIN);
     Judge judge = new Judge(free, priors);
     Judged right = judge.judge(Explanation.NONE);
     Judged best = judge.judge(account.best().explanation());
@@ -67,23 +67,14 @@ final class WholeRingFit {
   }
 
   private static double misfit(RowModel rows, Explanation explanation) {
-    double[] white = new Cholesky(rows.covariance(explanation)).whiten(residual(rows, explanation));
+    double[] white = new Cholesky(rows.covariance(explanation)).whiten(rows.residual(explanation));
     return Judge.dot(white, white);
-  }
-
-  private static double[] residual(RowModel rows, Explanation explanation) {
-    double[] mean = rows.mean(rows.ring().polarisation(explanation));
-    double[] residual = rows.read();
-    for (int i = 0; i < residual.length; i++) {
-      residual[i] -= mean[i];
-    }
-    return residual;
   }
 
   private double gain(RowModel rows, Explanation explanation) {
     Cholesky factor = new Cholesky(rows.covariance(explanation));
-    double[] mean = factor.whiten(rows.mean(rows.ring().polarisation(explanation)));
-    double[] white = factor.whiten(residual(rows, explanation));
+    double[] mean = factor.whiten(rows.mean(explanation));
+    double[] white = factor.whiten(rows.residual(explanation));
     return Judge.dot(mean, white) / Judge.dot(mean, mean);
   }
 
@@ -92,8 +83,8 @@ final class WholeRingFit {
     for (int round = 0; round < ROUNDS; round++) {
       RowModel moved = movedBy(offset);
       Cholesky factor = new Cholesky(moved.covariance(explanation));
-      double[] slope = factor.whiten(moved.probeSlope(moved.ring().polarisation(explanation)));
-      double[] white = factor.whiten(residual(moved, explanation));
+      double[] slope = factor.whiten(moved.probeSlope(explanation));
+      double[] white = factor.whiten(moved.residual(explanation));
       double step = Judge.dot(slope, white) / Judge.dot(slope, slope);
       offset += Math.clamp(step, -LARGEST_STEP_METRES, LARGEST_STEP_METRES);
     }

@@ -149,7 +149,7 @@ final class Trials {
 
   private static double logLikelihood(RowModel rows, Explanation explanation) {
     Cholesky factor = new Cholesky(rows.covariance(explanation));
-    double[] mean = rows.mean(rows.ring().polarisation(explanation));
+    double[] mean = rows.mean(explanation);
     double[] residual = rows.read();
     for (int i = 0; i < residual.length; i++) {
       residual[i] -= mean[i];
