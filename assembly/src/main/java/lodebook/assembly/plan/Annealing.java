@@ -104,7 +104,7 @@ final class Annealing {
     int slot = puzzle.movable[random.nextInt(puzzle.movable.length)];
     int[] pool = puzzle.pools[puzzle.poolOf[slot]];
     int other = pool[random.nextInt(pool.length)];
-    if (other != slot) {
+    if (trial.mayExchange(slot, other)) {
       double rise = trial.costWith(slot, other) - trial.cost();
       if (rise <= 0 || rise < temperature * logarithms[random.nextInt(LOGARITHMS)]) {
         trial.exchange(slot, other);
@@ -135,7 +135,8 @@ final class Annealing {
         int bestOther = -1;
         double bestCost = trial.cost() * (1 - 1e-12);
         for (int other : puzzle.pools[puzzle.poolOf[slot]]) {
-          double cost = other == slot ? Double.MAX_VALUE : trial.costWith(slot, other);
+          double cost =
+              trial.mayExchange(slot, other) ? trial.costWith(slot, other) : Double.MAX_VALUE;
           if (cost < bestCost) {
             bestCost = cost;
             bestOther = other;

@@ -74,7 +74,7 @@ final class BatchAnnealing {
         int slot = slots[random.nextInt(slots.length)];
         int other =
             random.nextBoolean() ? inRing(slot, poolOf[slot], random) : alike(trial, slot, random);
-        if (other != slot) {
+        if (trial.mayExchange(slot, other)) {
           double rise = trial.change(slot, other);
           if (rise <= 0 || rise < -temperature * Math.log(random.nextDouble())) {
             trial.exchange(slot, other);

@@ -2,6 +2,8 @@ package lodebook.assembly.plan;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
+import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.IntStream;
@@ -67,17 +69,24 @@ final class BatchHolders {
     }
     sources = new ArrayList<>(Arrays.asList(inSlots));
     sources.addAll(spares);
-    puzzle = new BatchPuzzle(forms, sources, pools.toArray(int[][]::new), targets(inSlots, first));
+    int[] home = sources.stream().mapToInt(this::home).toArray();
+    puzzle =
+        new BatchPuzzle(forms, sources, home, pools.toArray(int[][]::new), targets(inSlots, first));
   }
 
   private void fillPlain(BatchLots.Bucket bucket, String type, int[] first, Source[] plain) {
-    int at = 0;
+    Iterator<Source> others = bucket.pieces().stream().filter(each -> home(each) < 0).iterator();
     for (int ring : bucket.rings()) {
+      Iterator<Source> own = bucket.pieces().stream().filter(each -> home(each) == ring).iterator();
       for (int slot : task.rings().get(ring).emptySlots(type)) {
-        plain[first[ring] + slot - 1] = bucket.pieces().get(at);
-        at++;
+        plain[first[ring] + slot - 1] = own.hasNext() ? own.next() : others.next();
       }
     }
+  }
+
+  private int home(Source source) {
+    String piece = source.piece();
+    return piece == null || source.facing() != null ? -1 : task.wishedFor(piece);
   }
 
   /// Classes of slots of one type in the rings of a bucket: the first class of all rings, then the
@@ -210,9 +219,33 @@ final class BatchHolders {
     return puzzle;
   }
 
-  /// The order in which the pieces are dealt.
+  /// The order in which the pieces are dealt; pieces that a ring must have change places with the
+  /// pieces most like them there.
   int[] dealt() {
-    return IntStream.range(0, sources.size()).toArray();
+    int[] order = IntStream.range(0, sources.size()).toArray();
+    for (int[] pool : puzzle.pools) {
+      for (int holder : pool) {
+        while (!puzzle.fits(order[holder], puzzle.ringOf[holder])) {
+          int piece = order[holder];
+          int slot = mostAlikeAtHome(piece, pool, order);
+          order[holder] = order[slot];
+          order[slot] = piece;
+        }
+      }
+    }
+    return order;
+  }
+
+  /// The slot of the ring that must have a piece, with the piece most like it that needn't be
+  /// there.
+  private int mostAlikeAtHome(int piece, int[] pool, int[] order) {
+    int ring = puzzle.home[piece];
+    double wanted = puzzle.strength[piece];
+    return Arrays.stream(pool)
+        .filter(each -> puzzle.ringOf[each] == ring && puzzle.home[order[each]] != ring)
+        .boxed()
+        .min(Comparator.comparingDouble(each -> Math.abs(puzzle.strength[order[each]] - wanted)))
+        .orElseThrow();
   }
 
   List<Source> inSlots(int ring, int[] order) {

@@ -87,7 +87,14 @@ public final class BatchPlanner {
     List<Candidate> strongestFirst = new ArrayList<>(task.candidates());
     strongestFirst.sort(
         Comparator.comparingDouble((Candidate each) -> -each.strength().remanenceTesla()));
-    BatchTask sorted = new BatchTask(task.rings(), strongestFirst, task.unmeasured(), task.mix());
+    BatchTask sorted =
+        new BatchTask(
+            task.rings(),
+            strongestFirst,
+            task.unmeasured(),
+            task.mix(),
+            task.wished(),
+            task.apart());
     Map<String, RingFigures> planned = new LinkedHashMap<>();
     plan.plans().forEach((rotor, each) -> planned.put(rotor, RingFigures.of(each)));
     Map<Arranged, Map<String, RingFigures>> figures = new EnumMap<>(Arranged.class);

@@ -20,14 +20,19 @@ final class BatchPuzzle {
   final double[] strength;
   final double[] variance;
 
+  /// For each piece the ring that must have it, or −1.
+  final int[] home;
+
   /// Holders that may exchange their pieces.
   final int[][] pools;
 
   /// Wanted |w·s| of each ring, tesla.
   final double[] target;
 
-  BatchPuzzle(HarmonicForm[] forms, List<Source> holders, int[][] pools, double[] target) {
+  BatchPuzzle(
+      HarmonicForm[] forms, List<Source> holders, int[] home, int[][] pools, double[] target) {
     this.forms = forms;
+    this.home = home;
     this.pools = pools;
     this.target = target;
     strength = holders.stream().mapToDouble(Source::remanence).toArray();
@@ -39,6 +44,11 @@ final class BatchPuzzle {
       first[ring + 1] = first[ring] + forms[ring].slots;
       Arrays.fill(ringOf, first[ring], first[ring + 1], ring);
     }
+  }
+
+  /// Whether a piece may be in a ring, or spare for −1.
+  boolean fits(int piece, int ring) {
+    return home[piece] < 0 || home[piece] == ring;
   }
 
   int spares() {

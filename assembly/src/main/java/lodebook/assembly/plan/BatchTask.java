@@ -1,6 +1,7 @@
 package lodebook.assembly.plan;
 
 import java.util.List;
+import java.util.Map;
 import java.util.stream.IntStream;
 import lodebook.assembly.layout.RingDesign;
 
@@ -10,8 +11,15 @@ import lodebook.assembly.layout.RingDesign;
 /// @param candidates measured pieces that may be used, in the order of their numbers
 /// @param unmeasured lots of which any magnet may be used, where measured pieces do not suffice
 /// @param mix which lots may go together in one rotor
+/// @param wished names of candidates that must be used, each with the serial number of its rotor
+/// @param apart lots of one type that must not go together in one rotor
 public record BatchTask(
-    List<Ring> rings, List<Candidate> candidates, List<LotSupply> unmeasured, MixPolicy mix) {
+    List<Ring> rings,
+    List<Candidate> candidates,
+    List<LotSupply> unmeasured,
+    MixPolicy mix,
+    Map<String, String> wished,
+    LotsApart apart) {
 
   /// One rotor of the batch.
   ///
@@ -37,9 +45,27 @@ public record BatchTask(
     rings = List.copyOf(rings);
     candidates = List.copyOf(candidates);
     unmeasured = List.copyOf(unmeasured);
+    wished = Map.copyOf(wished);
     if (candidates.stream().map(Candidate::piece).distinct().count() < candidates.size()) {
       throw new IllegalArgumentException("a piece is offered twice for the batch");
     }
+  }
+
+  /// A task in which no piece must be used and no lot is apart from another.
+  public BatchTask(
+      List<Ring> rings, List<Candidate> candidates, List<LotSupply> unmeasured, MixPolicy mix) {
+    this(rings, candidates, unmeasured, mix, Map.of(), LotsApart.NONE);
+  }
+
+  /// Index of the ring that must have a piece, or −1.
+  int wishedFor(String piece) {
+    String rotor = wished.get(piece);
+    return rotor == null
+        ? -1
+        : IntStream.range(0, rings.size())
+            .filter(i -> rings.get(i).rotor().equals(rotor))
+            .findFirst()
+            .orElse(-1);
   }
 
   /// Types of magnet that the rotors want, in the order in which they are wanted first.

@@ -74,6 +74,15 @@ final class BatchTrial {
     return sum;
   }
 
+  /// Whether a slot's piece and another holder's may be exchanged.
+  boolean mayExchange(int slot, int other) {
+    int ring = puzzle.ringOf[slot];
+    int otherRing = puzzle.ringOf[other];
+    return slot != other
+        && (ring == otherRing
+            || (puzzle.fits(order[slot], otherRing) && puzzle.fits(order[other], ring)));
+  }
+
   /// Change of the cost when a slot's piece and another holder's are exchanged.
   double change(int slot, int other) {
     double step = s[other] - s[slot];

@@ -28,6 +28,11 @@ final class ExactSearch {
   private final int[][] sorted;
 
   private final boolean[] used;
+
+  /// For each pool the slots still to be filled and the wished pieces still to be placed.
+  private final int[] slotsLeft;
+
+  private final int[] wishedLeft;
   private final double[] s;
   private final int[] chosen;
   private final double largestWorkingSquare;
@@ -61,6 +66,12 @@ final class ExactSearch {
               .toArray();
     }
     used = new boolean[puzzle.holders()];
+    slotsLeft = new int[sorted.length];
+    wishedLeft = new int[sorted.length];
+    for (int i = 0; i < sorted.length; i++) {
+      slotsLeft[i] = (int) IntStream.of(puzzle.pools[i]).filter(holder -> holder < n).count();
+      wishedLeft[i] = (int) IntStream.of(puzzle.pools[i]).filter(p -> puzzle.wished[p]).count();
+    }
     s = new double[n];
     chosen = new int[n];
     largestWorkingSquare = Math.pow(LowerBound.largestAmplitude(puzzle), 2);
@@ -105,14 +116,20 @@ final class ExactSearch {
                   && puzzle.strength[pieces[above]] - wanted
                       < wanted - puzzle.strength[pieces[below]]);
       int piece = up ? pieces[above++] : pieces[below--];
-      if (!used[piece]) {
+      boolean roomForIt = puzzle.wished[piece] || wishedLeft[pool] < slotsLeft[pool];
+      if (!used[piece] && roomForIt) {
         double residual = known + pivot * puzzle.strength[piece];
         if (soFar + residual * residual >= limit()) {
           return;
         }
+        int wished = puzzle.wished[piece] ? 1 : 0;
         used[piece] = true;
+        slotsLeft[pool]--;
+        wishedLeft[pool] -= wished;
         place(depth, piece, soFar, residual);
         used[piece] = false;
+        slotsLeft[pool]++;
+        wishedLeft[pool] += wished;
       }
     }
   }

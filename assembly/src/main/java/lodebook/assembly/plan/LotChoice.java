@@ -52,35 +52,36 @@ final class LotChoice {
     return sets;
   }
 
-  /// Under FREE all lots; under NEVER each single lot; under FEW the sets of the smallest size that
-  /// suffice, or all lots where nothing does. Lots of magnets in place are in the rotor anyway.
+  /// Under FREE all lots that may go together; under NEVER each single lot; under FEW the sets of
+  /// the smallest size that suffice, or the largest where nothing does. Lots of magnets in place
+  /// and of wished pieces are in the rotor anyway.
   private List<Set<String>> smallestSets(String type) {
     Map<String, Integer> supply = supplyByLot(type);
-    Set<String> inPlace = lotsInPlace(type);
+    Set<String> inAnyway = lotsInAnyway(type);
     int needed = task.emptySlots(type).size();
     if (needed == 0) {
       return List.of(Set.of());
     }
     if (task.mix() == MixPolicy.FREE) {
-      return List.of(supply.keySet());
+      return task.apart().largest(supply.keySet(), inAnyway);
     }
     if (task.mix() == MixPolicy.NEVER) {
-      return inPlace.isEmpty()
+      return inAnyway.isEmpty()
           ? supply.entrySet().stream()
               .sorted((a, b) -> Boolean.compare(b.getValue() >= needed, a.getValue() >= needed))
               .map(each -> Set.of(each.getKey()))
               .toList()
-          : List.of(inPlace.size() == 1 ? inPlace : Set.of());
+          : List.of(inAnyway.size() == 1 ? inAnyway : Set.of());
     }
-    List<String> others = supply.keySet().stream().filter(lot -> !inPlace.contains(lot)).toList();
+    List<String> others = supply.keySet().stream().filter(lot -> !inAnyway.contains(lot)).toList();
     for (int size = 0; size <= others.size(); size++) {
       List<Set<String>> enough = new ArrayList<>();
-      choose(type, others, 0, size, inPlace, needed, enough);
+      choose(type, others, 0, size, inAnyway, needed, enough);
       if (!enough.isEmpty()) {
         return enough;
       }
     }
-    return List.of(supply.keySet());
+    return task.apart().largest(supply.keySet(), inAnyway);
   }
 
   private void choose(
@@ -103,15 +104,20 @@ final class LotChoice {
     for (int i = from; i <= others.size() - size; i++) {
       Set<String> with = new LinkedHashSet<>(soFar);
       with.add(others.get(i));
-      choose(type, others, i + 1, size - 1, with, needed, enough);
+      if (task.apart().allow(with, lotsInAnyway(type))) {
+        choose(type, others, i + 1, size - 1, with, needed, enough);
+      }
     }
   }
 
-  private Set<String> lotsInPlace(String type) {
+  private Set<String> lotsInAnyway(String type) {
     Set<String> lots = new TreeSet<>();
     task.kept().stream()
         .filter(kept -> task.layout().typeAt(kept.slot()).equals(type))
         .forEach(kept -> lots.add(kept.lot()));
+    task.candidates().stream()
+        .filter(each -> each.type().equals(type) && task.wished().contains(each.piece()))
+        .forEach(each -> lots.add(each.lot()));
     return lots;
   }
 

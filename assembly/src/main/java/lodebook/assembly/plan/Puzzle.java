@@ -16,6 +16,9 @@ final class Puzzle {
   /// Variance of a single piece about that, tesla², for unmeasured ones; 0 for measured ones.
   final double[] variance;
 
+  /// Whether each piece must be in a slot.
+  final boolean[] wished;
+
   /// Holders of each pool; every pool has at least one slot.
   final int[][] pools;
 
@@ -34,12 +37,14 @@ final class Puzzle {
       HarmonicForm form,
       double[] strength,
       double[] variance,
+      boolean[] wished,
       int[][] pools,
       double target,
       double tolerance) {
     this.form = form;
     this.strength = strength;
     this.variance = variance;
+    this.wished = wished;
     this.pools = pools;
     this.target = target;
     this.tolerance = tolerance;
@@ -57,6 +62,17 @@ final class Puzzle {
             .filter(holder -> holder < form.slots)
             .sorted()
             .toArray();
+  }
+
+  /// A puzzle in which no piece must be in a slot.
+  Puzzle(
+      HarmonicForm form,
+      double[] strength,
+      double[] variance,
+      int[][] pools,
+      double target,
+      double tolerance) {
+    this(form, strength, variance, new boolean[strength.length], pools, target, tolerance);
   }
 
   int holders() {
@@ -87,6 +103,28 @@ final class Puzzle {
               .toArray();
       for (int i = 0; i < pool.length; i++) {
         order[pool[i]] = pieces[i];
+      }
+    }
+    return bringWishedIn(order);
+  }
+
+  /// Puts each wished piece that is spare into a slot, for the piece most like it there.
+  int[] bringWishedIn(int[] order) {
+    for (int[] pool : pools) {
+      for (int holder : pool) {
+        if (holder >= form.slots && wished[order[holder]]) {
+          int piece = order[holder];
+          int slot =
+              Arrays.stream(pool)
+                  .filter(each -> each < form.slots && !wished[order[each]])
+                  .boxed()
+                  .min(
+                      Comparator.comparingDouble(
+                          each -> Math.abs(strength[order[each]] - strength[piece])))
+                  .orElseThrow();
+          order[holder] = order[slot];
+          order[slot] = piece;
+        }
       }
     }
     return order;

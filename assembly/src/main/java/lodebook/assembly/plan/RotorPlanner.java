@@ -155,9 +155,9 @@ public final class RotorPlanner {
     if (task.mix() == MixPolicy.FREE || offered.isEmpty()) {
       return null;
     }
-    Set<String> all = new LotChoice(task.withMix(MixPolicy.FREE)).sets().getFirst();
-    Puzzle free = stocked(all).puzzle();
     Effort quick = new Effort(effort.steps() / 4 + 1, effort.keepGoing(), ratio -> {});
+    List<Set<String>> sets = new LotChoice(task.withMix(MixPolicy.FREE)).sets();
+    Puzzle free = chosen(sets, seed, quick).puzzle();
     return free.unwanted(new Annealing(free, classes(free), seed, quick).search());
   }
 

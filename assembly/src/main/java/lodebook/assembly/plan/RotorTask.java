@@ -1,6 +1,9 @@
 package lodebook.assembly.plan;
 
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Set;
 import java.util.stream.IntStream;
 import lodebook.assembly.layout.Layout;
 import org.jspecify.annotations.Nullable;
@@ -17,24 +20,67 @@ import org.jspecify.annotations.Nullable;
 /// @param mix which lots may go together
 /// @param targetAmplitudeTesla wanted working amplitude; null for that of a ring by the rule with
 ///   the mean strengths of the lots drawn from and of what is kept
+/// @param wished names of candidates that must be used
+/// @param apart lots of one type that must not go together
 public record RotorTask(
     Layout layout,
     List<Candidate> candidates,
     List<LotSupply> unmeasured,
     List<Kept> kept,
     MixPolicy mix,
-    @Nullable Double targetAmplitudeTesla) {
+    @Nullable Double targetAmplitudeTesla,
+    Set<String> wished,
+    LotsApart apart) {
 
   public RotorTask {
     candidates = List.copyOf(candidates);
     unmeasured = List.copyOf(unmeasured);
     kept = List.copyOf(kept);
+    wished = Set.copyOf(wished);
     if (kept.stream().map(Kept::slot).distinct().count() < kept.size()) {
       throw new IllegalArgumentException("a slot of " + layout.name() + " is kept twice");
     }
     if (candidates.stream().map(Candidate::piece).distinct().count() < candidates.size()) {
       throw new IllegalArgumentException("a piece is offered twice for " + layout.name());
     }
+    refuseWishesThatCannotBe(layout, candidates, kept, wished);
+  }
+
+  private static void refuseWishesThatCannotBe(
+      Layout layout, List<Candidate> candidates, List<Kept> kept, Set<String> wished) {
+    Map<String, Integer> byType = new HashMap<>();
+    for (Candidate each : candidates) {
+      if (wished.contains(each.piece())) {
+        byType.merge(each.type(), 1, Integer::sum);
+      }
+    }
+    int found = byType.values().stream().mapToInt(count -> count).sum();
+    if (found < wished.size()) {
+      throw new IllegalArgumentException("a piece that is wished is not offered");
+    }
+    byType.forEach(
+        (type, count) -> {
+          long empty =
+              IntStream.rangeClosed(1, layout.slots())
+                  .filter(slot -> layout.typeAt(slot).equals(type))
+                  .filter(slot -> kept.stream().noneMatch(each -> each.slot() == slot))
+                  .count();
+          if (count > empty) {
+            throw new IllegalArgumentException(
+                count + " pieces of type " + type + " are wished for " + empty + " empty slots");
+          }
+        });
+  }
+
+  /// A task in which no piece must be used and no lot is apart from another.
+  public RotorTask(
+      Layout layout,
+      List<Candidate> candidates,
+      List<LotSupply> unmeasured,
+      List<Kept> kept,
+      MixPolicy mix,
+      @Nullable Double targetAmplitudeTesla) {
+    this(layout, candidates, unmeasured, kept, mix, targetAmplitudeTesla, Set.of(), LotsApart.NONE);
   }
 
   /// A task with no slot filled, few lots and the amplitude of the stock's mean.
@@ -57,6 +103,7 @@ public record RotorTask(
   }
 
   RotorTask withMix(MixPolicy other) {
-    return new RotorTask(layout, candidates, unmeasured, kept, other, targetAmplitudeTesla);
+    return new RotorTask(
+        layout, candidates, unmeasured, kept, other, targetAmplitudeTesla, wished, apart);
   }
 }

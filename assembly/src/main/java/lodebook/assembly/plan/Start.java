@@ -32,7 +32,7 @@ final class Start {
         order[pool[i]] = pieces[i];
       }
     }
-    return order;
+    return puzzle.bringWishedIn(order);
   }
 
   /// Neighbours in strength in each class of slots, in any order within it.
@@ -48,7 +48,7 @@ final class Start {
         }
       }
     }
-    return order;
+    return puzzle.bringWishedIn(order);
   }
 
   private static void put(int piece, int holder, int[] order, int[] holderOf) {

@@ -43,21 +43,32 @@ final class Stocked {
     }
     sources = new ArrayList<>(Arrays.asList(inSlots));
     sources.addAll(spares);
+    boolean[] wished = new boolean[sources.size()];
+    for (int i = 0; i < wished.length; i++) {
+      String piece = sources.get(i).piece();
+      wished[i] = piece != null && task.wished().contains(piece);
+    }
     puzzle =
         new Puzzle(
             form,
             sources.stream().mapToDouble(Source::remanence).toArray(),
             sources.stream().mapToDouble(Source::variance).toArray(),
+            wished,
             pools.toArray(int[][]::new),
             target / 2,
             task.layout().workingAmplitudeTolerance());
   }
 
+  /// What may be used of a type, wished pieces first.
   private List<Source> usable(String type, Set<String> lots, int needed) {
     List<Source> usable = new ArrayList<>();
-    for (Candidate each : task.candidates()) {
-      if (each.type().equals(type) && lots.contains(each.lot())) {
-        usable.add(Source.of(each));
+    for (boolean wished : new boolean[] {true, false}) {
+      for (Candidate each : task.candidates()) {
+        if (each.type().equals(type)
+            && lots.contains(each.lot())
+            && task.wished().contains(each.piece()) == wished) {
+          usable.add(Source.of(each));
+        }
       }
     }
     for (LotSupply each : task.unmeasured()) {

@@ -61,6 +61,11 @@ final class Trial {
     return order.clone();
   }
 
+  /// Whether the pieces of a slot and another holder may be exchanged: wished ones stay in slots.
+  boolean mayExchange(int slot, int other) {
+    return slot != other && (other < n || !puzzle.wished[order[slot]]);
+  }
+
   /// Cost after the pieces of a slot and another holder of its pool were exchanged.
   double costWith(int slot, int other) {
     double step = s[other] - s[slot];

@@ -113,7 +113,7 @@ class ProofTest {
     return best(form, strength, 0);
   }
 
-  private static double best(HarmonicForm form, double[] strength, int from) {
+  static double best(HarmonicForm form, double[] strength, int from) {
     if (from == form.slots) {
       return form.unwanted(strength);
     }
