@@ -72,7 +72,8 @@ class ImportSpeedTest {
   private static double bareSeconds(BookAddress.Folder place) throws SQLException {
     Path file = place.path().resolve("book");
     Path other = place.path().resolve("bare" + System.nanoTime());
-    try (Connection from = DriverManager.getConnection("jdbc:h2:" + file, "sa", "");
+    try (Connection from =
+            DriverManager.getConnection("jdbc:h2:" + file + ";MAX_COMPACT_TIME=0", "sa", "");
         Statement reading = from.createStatement();
         Connection to =
             DriverManager.getConnection(
