@@ -1,8 +1,11 @@
 package lodebook.assembly.survey;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import lodebook.assembly.layout.ProbePoint;
 import org.hipparchus.special.Erf;
 
@@ -15,119 +18,170 @@ final class Comparisons {
   private static final double PAIRS_APART = square(2 * 2.3263);
 
   private static final int NEAR_SLOTS = 2;
+  private static final int[] NOTHING = {};
 
-  /// @param least square of the separation that is wanted
-  private record Two(List<Fault> one, List<Fault> other, double least) {}
+  /// Two explanations by the numbers of their faults.
+  @SuppressWarnings("ArrayRecordComponent")
+  private record Two(int[] one, int[] other) {}
 
+  private final List<Fault> faults;
   private final List<Two> singles;
   private final List<Two> pairs;
 
   Comparisons(RingModel ring) {
-    this(new ArrayList<>(), new ArrayList<>());
-    List<Fault> faults = new ArrayList<>();
+    this(new ArrayList<>(), new ArrayList<>(), new ArrayList<>());
+    int[] reversalAt = new int[ring.slots()];
+    Arrays.fill(reversalAt, -1);
     for (int slot = 0; slot < ring.slots(); slot++) {
-      Possible.of(ring, slot).stream().filter(f -> !f.fitted()).forEach(faults::add);
+      for (Fault fault : Possible.of(ring, slot)) {
+        if (!fault.fitted()) {
+          if (fault.kind() == FaultKind.REVERSED) {
+            reversalAt[slot] = faults.size();
+          }
+          faults.add(fault);
+        }
+      }
     }
     for (int e = 0; e < faults.size(); e++) {
-      singles.add(new Two(List.of(), List.of(faults.get(e)), SINGLES_APART));
+      singles.add(new Two(NOTHING, new int[] {e}));
       for (int f = e + 1; f < faults.size(); f++) {
-        singles.add(new Two(List.of(faults.get(e)), List.of(faults.get(f)), SINGLES_APART));
+        singles.add(new Two(new int[] {e}, new int[] {f}));
       }
     }
-    List<Fault> reversals = faults.stream().filter(f -> f.kind() == FaultKind.REVERSED).toList();
-    for (int i = 0; i < reversals.size(); i++) {
-      for (int j = i + 1; j < reversals.size(); j++) {
-        addPair(reversals, i, j, faults, ring.slots());
-      }
-    }
-  }
-
-  private Comparisons(List<Two> singles, List<Two> pairs) {
-    this.singles = singles;
-    this.pairs = pairs;
-  }
-
-  private void addPair(List<Fault> reversals, int i, int j, List<Fault> faults, int slots) {
-    List<Fault> pair = List.of(reversals.get(i), reversals.get(j));
-    pairs.add(new Two(List.of(), pair, PAIRS_APART));
-    for (Fault fault : faults) {
-      if (near(fault, pair.getFirst(), slots) || near(fault, pair.getLast(), slots)) {
-        pairs.add(new Two(List.of(fault), pair, PAIRS_APART));
-      }
-    }
-    for (int k = 0; k < reversals.size(); k++) {
-      for (int l = k + 1; l < reversals.size(); l++) {
-        boolean later = k > i || (k == i && l > j);
-        boolean straight =
-            near(reversals.get(k), pair.getFirst(), slots)
-                && near(reversals.get(l), pair.getLast(), slots);
-        boolean crossed =
-            near(reversals.get(l), pair.getFirst(), slots)
-                && near(reversals.get(k), pair.getLast(), slots);
-        if (later && (straight || crossed)) {
-          pairs.add(new Two(pair, List.of(reversals.get(k), reversals.get(l)), PAIRS_APART));
+    for (int i = 0; i < ring.slots(); i++) {
+      for (int j = i + 1; j < ring.slots(); j++) {
+        if (reversalAt[i] >= 0 && reversalAt[j] >= 0) {
+          addPair(reversalAt, i, j);
         }
       }
     }
   }
 
-  private static boolean near(Fault one, Fault other, int slots) {
-    int steps = Math.floorMod(one.place() - other.place(), slots);
+  private Comparisons(List<Fault> faults, List<Two> singles, List<Two> pairs) {
+    this.faults = faults;
+    this.singles = singles;
+    this.pairs = pairs;
+  }
+
+  private void addPair(int[] reversalAt, int i, int j) {
+    int[] pair = {reversalAt[i], reversalAt[j]};
+    int slots = reversalAt.length;
+    pairs.add(new Two(NOTHING, pair));
+    for (int f = 0; f < faults.size(); f++) {
+      int place = faults.get(f).place();
+      if (near(place, i, slots) || near(place, j, slots)) {
+        pairs.add(new Two(new int[] {f}, pair));
+      }
+    }
+    Set<Integer> seen = new HashSet<>();
+    for (int di = -NEAR_SLOTS; di <= NEAR_SLOTS; di++) {
+      for (int dj = -NEAR_SLOTS; dj <= NEAR_SLOTS; dj++) {
+        int k = Math.floorMod(i + di, slots);
+        int l = Math.floorMod(j + dj, slots);
+        int first = Math.min(k, l);
+        int last = Math.max(k, l);
+        boolean later = first > i || (first == i && last > j);
+        boolean there = first != last && reversalAt[first] >= 0 && reversalAt[last] >= 0;
+        if (later && there && seen.add(first * slots + last)) {
+          pairs.add(new Two(pair, new int[] {reversalAt[first], reversalAt[last]}));
+        }
+      }
+    }
+  }
+
+  private static boolean near(int one, int other, int slots) {
+    int steps = Math.floorMod(one - other, slots);
     return Math.min(steps, slots - steps) <= NEAR_SLOTS;
+  }
+
+  /// The faults that are compared, by their numbers.
+  List<Fault> faults() {
+    return List.copyOf(faults);
   }
 
   /// The same without what even these separations do not tell: no reading could be asked for it.
   Comparisons without(Separations all) {
     return new Comparisons(
-        singles.stream().filter(two -> lack(two, all) == 0).toList(),
-        pairs.stream().filter(two -> lack(two, all) == 0).toList());
+        faults,
+        singles.stream().filter(two -> lack(two, SINGLES_APART, all) == 0).toList(),
+        pairs.stream().filter(two -> lack(two, PAIRS_APART, all) == 0).toList());
   }
 
   /// How much is missing until everything is told apart; 0 if nothing is.
   double lack(Separations separations) {
     double sum = 0;
     for (Two two : singles) {
-      sum += lack(two, separations);
+      sum += lack(two, SINGLES_APART, separations);
     }
     for (Two two : pairs) {
-      sum += lack(two, separations);
+      sum += lack(two, PAIRS_APART, separations);
     }
     return sum;
   }
 
-  private static double lack(Two two, Separations separations) {
-    return Math.max(0, 1 - separations.square(two.one(), two.other()) / two.least());
+  /// Whether everything is told apart.
+  boolean allTold(Separations separations) {
+    for (Two two : singles) {
+      if (lack(two, SINGLES_APART, separations) > 0) {
+        return false;
+      }
+    }
+    for (Two two : pairs) {
+      if (lack(two, PAIRS_APART, separations) > 0) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private static double lack(Two two, double least, Separations separations) {
+    return Math.max(0, 1 - separations.square(two.one(), two.other()) / least);
   }
 
   ProbeReport report(List<ProbePoint> points, Separations separations) {
-    List<ToldApart> single = told(singles, separations);
-    List<ToldApart> pair = told(pairs, separations);
     return new ProbeReport(
         points,
-        single.getFirst(),
-        pair.getFirst(),
-        single.stream().filter(t -> t.errorRate() > errorRate(SINGLES_APART)).toList(),
-        pair.stream().filter(t -> t.errorRate() > errorRate(PAIRS_APART)).toList());
+        worst(singles, separations),
+        worst(pairs, separations),
+        alike(singles, SINGLES_APART, separations),
+        alike(pairs, PAIRS_APART, separations));
   }
 
-  private static List<ToldApart> told(List<Two> twos, Separations separations) {
-    return twos.stream()
-        .map(
-            two ->
-                new ToldApart(
-                    named(two.one()),
-                    named(two.other()),
-                    errorRate(separations.square(two.one(), two.other()))))
-        .sorted(Comparator.comparingDouble(t -> -t.errorRate()))
+  private ToldApart worst(List<Two> twos, Separations separations) {
+    Two nearest = twos.getFirst();
+    double least = Double.POSITIVE_INFINITY;
+    for (Two two : twos) {
+      double square = separations.square(two.one(), two.other());
+      if (square < least) {
+        least = square;
+        nearest = two;
+      }
+    }
+    return told(nearest, least);
+  }
+
+  private List<ToldApart> alike(List<Two> twos, double least, Separations separations) {
+    List<ToldApart> alike = new ArrayList<>();
+    for (Two two : twos) {
+      double square = separations.square(two.one(), two.other());
+      if (square < least) {
+        alike.add(told(two, square));
+      }
+    }
+    alike.sort(Comparator.comparingDouble(t -> -t.errorRate()));
+    return alike;
+  }
+
+  private ToldApart told(Two two, double square) {
+    return new ToldApart(
+        named(two.one()), named(two.other()), 0.5 * Erf.erfc(Math.sqrt(square / 8)));
+  }
+
+  private List<NamedFault> named(int[] numbers) {
+    return Arrays.stream(numbers)
+        .mapToObj(faults::get)
+        .map(f -> new NamedFault(f.place() + 1, f.name()))
         .toList();
-  }
-
-  private static List<NamedFault> named(List<Fault> faults) {
-    return faults.stream().map(f -> new NamedFault(f.place() + 1, f.name())).toList();
-  }
-
-  private static double errorRate(double square) {
-    return 0.5 * Erf.erfc(Math.sqrt(square) / (2 * Math.sqrt(2)));
   }
 
   private static double square(double value) {

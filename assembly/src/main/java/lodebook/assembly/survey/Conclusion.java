@@ -65,6 +65,7 @@ final class Conclusion {
     } else if (!best.explanation().namesNoMagnet()) {
       verdict = Verdict.FAULT;
       reason = Diagnosis.Reason.FAULT_SHOWN;
+      next.addAll(partingReadings(best, strengthBesides(best)));
     } else if (!best.explanation().faults().isEmpty()) {
       verdict = Verdict.CANNOT_TELL;
       reason = Diagnosis.Reason.SUSPECT_READING;
@@ -96,7 +97,7 @@ final class Conclusion {
     Judged best = account.best();
     return account.weighed().stream()
         .filter(j -> saysOther(j.explanation(), best.explanation()))
-        .filter(j -> !addsOnlyUnseen(j.explanation(), best.explanation()))
+        .filter(j -> !onlyAdds(j.explanation(), best.explanation()))
         .findFirst()
         .orElse(null);
   }
@@ -107,7 +108,7 @@ final class Conclusion {
     return !best.explanation().namesNoMagnet()
         && account.weighed().stream()
             .filter(j -> saysOther(j.explanation(), best.explanation()))
-            .filter(j -> !addsOnlyUnseen(j.explanation(), best.explanation()))
+            .filter(j -> !onlyAdds(j.explanation(), best.explanation()))
             .limit(TRIED_WITH_FREE_GAIN)
             .filter(j -> j.logWeight() > best.logWeight() - WITHIN_REACH)
             .anyMatch(j -> whole.logOddsFreed(best, j) < 0);
@@ -119,16 +120,33 @@ final class Conclusion {
     return !family(one).equals(family(other));
   }
 
-  /// Whether an explanation says the same and only adds faults of magnets of which nothing was read
-  /// yet. Such a fault is as likely before the readings as after them.
-  private boolean addsOnlyUnseen(Explanation more, Explanation found) {
-    Map<Integer, FaultKind> added = family(more);
+  /// Whether an explanation says the same and only adds what does not contradict it: faults of
+  /// magnets of which nothing was read yet, which are as likely before the readings as after them,
+  /// or magnets that may be off in strength besides.
+  private boolean onlyAdds(Explanation more, Explanation found) {
     Map<Integer, FaultKind> known = family(found);
-    boolean holds = added.entrySet().containsAll(known.entrySet());
-    added.keySet().removeAll(known.keySet());
-    return holds
-        && !known.isEmpty()
-        && added.keySet().stream().allMatch(place -> notShown.contains(place + 1));
+    return !known.isEmpty()
+        && family(more).entrySet().containsAll(known.entrySet())
+        && more.faults().stream()
+            .filter(f -> f.ofMagnet() && !known.containsKey(f.place()))
+            .allMatch(f -> ofStrength(f) || notShown.contains(f.place() + 1));
+  }
+
+  private static boolean ofStrength(Fault fault) {
+    return fault.name() == FaultKind.WEAK || fault.name() == FaultKind.STRONG;
+  }
+
+  /// The likeliest explanation that adds a weak or strong magnet to what was found, unless the odds
+  /// against it are over 20 to 1.
+  private @Nullable Judged strengthBesides(Judged best) {
+    double bar = best.logWeight() - Math.log(LEAST_ODDS);
+    return account.weighed().stream()
+        .filter(j -> j.logWeight() > bar)
+        .filter(j -> saysOther(j.explanation(), best.explanation()))
+        .filter(j -> onlyAdds(j.explanation(), best.explanation()))
+        .filter(j -> j.explanation().faults().stream().anyMatch(Conclusion::ofStrength))
+        .findFirst()
+        .orElse(null);
   }
 
   private static Map<Integer, FaultKind> family(Explanation explanation) {

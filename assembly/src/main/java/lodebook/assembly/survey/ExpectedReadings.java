@@ -18,7 +18,14 @@ public final class ExpectedReadings {
   /// @param ring the ring as planned, or as far as it is filled
   /// @param meter the meter that will be used
   public ExpectedReadings(SurveyedRing ring, Meter meter) {
-    this.ring = new RingModel(ring, new ProbeResponses(ring.design()));
+    this(ring, meter, new ProbeResponses(ring.design()));
+  }
+
+  /// @param ring the ring as planned, or as far as it is filled
+  /// @param meter the meter that will be used
+  /// @param responses of the same design, perhaps shared with other rings
+  public ExpectedReadings(SurveyedRing ring, Meter meter, ProbeResponses responses) {
+    this.ring = new RingModel(ring, responses);
     this.meter = meter;
   }
 

@@ -36,5 +36,5 @@ public record Priors(
   /// docs/decisions/survey-model.md).
   public static final Priors DEFAULT =
       new Priors(
-          0.02, 0.1, 0.002, 0.002, 0.001, 0.004, 0.00003, 0.0003, 0.05, 0.01, 0.02, 0.02, 0.005);
+          0.02, 0.1, 0.002, 0.002, 0.001, 0.004, 0.00003, 0.0015, 0.05, 0.01, 0.02, 0.02, 0.005);
 }

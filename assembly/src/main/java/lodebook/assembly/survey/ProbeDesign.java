@@ -47,7 +47,7 @@ public final class ProbeDesign {
 
   /// What a set of readings tells.
   public ProbeReport of(List<ProbePoint> points) {
-    return comparisons.report(points, separations(points));
+    return comparisons.report(points, among(points).at(points));
   }
 
   /// A set of readings with few points that tells every single fault apart at 1 in 1000 and every
@@ -59,7 +59,8 @@ public final class ProbeDesign {
   /// reading can be left out, not always the smallest.
   public ProbeReport cheapest() {
     List<List<ProbePoint>> families = families();
-    Comparisons possible = comparisons.without(separations(joined(families)));
+    Separations.Of everywhere = among(joined(families));
+    Comparisons possible = comparisons.without(everywhere.at(joined(families)));
     List<List<ProbePoint>> chosen = new ArrayList<>();
     List<List<ProbePoint>> left = new ArrayList<>(families);
     double lack = Double.POSITIVE_INFINITY;
@@ -67,7 +68,7 @@ public final class ProbeDesign {
       List<ProbePoint> best = left.getFirst();
       double least = Double.POSITIVE_INFINITY;
       for (List<ProbePoint> family : left) {
-        double then = possible.lack(separations(joined(with(chosen, family))));
+        double then = possible.lack(everywhere.at(joined(with(chosen, family))));
         if (then < least) {
           least = then;
           best = family;
@@ -80,24 +81,25 @@ public final class ProbeDesign {
     for (List<ProbePoint> family : List.copyOf(chosen)) {
       List<List<ProbePoint>> fewer = new ArrayList<>(chosen);
       fewer.remove(family);
-      if (!fewer.isEmpty() && possible.lack(separations(joined(fewer))) == 0) {
+      if (!fewer.isEmpty() && possible.allTold(everywhere.at(joined(fewer)))) {
         chosen = fewer;
       }
     }
-    List<ProbePoint> fewest = pruned(joined(chosen), possible);
-    if (possible.lack(separations(layoutPoints())) == 0) {
-      List<ProbePoint> ofLayout = pruned(layoutPoints(), possible);
+    List<ProbePoint> fewest = pruned(joined(chosen), possible, everywhere);
+    if (possible.allTold(everywhere.at(layoutPoints()))) {
+      List<ProbePoint> ofLayout = pruned(layoutPoints(), possible, everywhere);
       fewest = ofLayout.size() <= fewest.size() ? ofLayout : fewest;
     }
-    return of(fewest);
+    return comparisons.report(fewest, everywhere.at(fewest));
   }
 
-  private List<ProbePoint> pruned(List<ProbePoint> points, Comparisons possible) {
+  private static List<ProbePoint> pruned(
+      List<ProbePoint> points, Comparisons possible, Separations.Of everywhere) {
     List<ProbePoint> kept = points;
     for (ProbePoint point : points) {
       List<ProbePoint> fewer = new ArrayList<>(kept);
       fewer.remove(point);
-      if (!fewer.isEmpty() && possible.lack(separations(fewer)) == 0) {
+      if (!fewer.isEmpty() && possible.allTold(everywhere.at(fewer))) {
         kept = fewer;
       }
     }
@@ -132,7 +134,7 @@ public final class ProbeDesign {
     return families.stream().flatMap(List::stream).toList();
   }
 
-  private Separations separations(List<ProbePoint> points) {
+  private Separations.Of among(List<ProbePoint> points) {
     Probe probe = ring.layout().probe();
     List<Row> rows =
         points.stream()
@@ -141,6 +143,6 @@ public final class ProbeDesign {
                     new Row(
                         point, probe.radiusMetres(), probe.heightMetres(), 0, 0, true, meter, null))
             .toList();
-    return new Separations(new RowModel(ring, rows));
+    return new Separations.Of(points, new RowModel(ring, rows), comparisons.faults());
   }
 }

@@ -101,14 +101,19 @@ final class Search {
     return list;
   }
 
-  /// Covariance for the first screening.
+  /// Covariance for the first screening, factored.
   static Cholesky screening(RowModel rows) {
+    return new Cholesky(screeningCovariance(rows));
+  }
+
+  /// Covariance for the first screening, upper triangle.
+  static double[][] screeningCovariance(RowModel rows) {
     double[][] matrix = rows.covariance(Explanation.NONE);
     double[] plan = rows.singleVariances(Explanation.NONE);
     double[] wide = rows.largestSingleVariances();
     for (int i = 0; i < matrix.length; i++) {
       matrix[i][i] += 0.5 * (wide[i] - plan[i]);
     }
-    return new Cholesky(matrix);
+    return matrix;
   }
 }

@@ -73,6 +73,13 @@ final class Rings {
     return ring(3, 4, Focus.OUT, 10, 13, block, components);
   }
 
+  static RingDesign recoil32(List<Component> components) {
+    MagnetType block =
+        new MagnetType(
+            "BLR", Shape.BLOCK, 0.005, 0.005, 0.010, 0, 0, 0, "N42", 5e-5, "Ni-Cu-Ni", 1.05, 0);
+    return ring(8, 4, Focus.IN, 30, 26.5, block, components);
+  }
+
   static MagnetType block(double thickness, double width, double length) {
     return new MagnetType(
         "BLK",

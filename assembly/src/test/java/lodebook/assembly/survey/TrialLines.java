@@ -10,6 +10,7 @@ import java.util.TreeSet;
 import java.util.function.BiFunction;
 import java.util.function.Function;
 import lodebook.assembly.layout.Component;
+import lodebook.assembly.layout.MutualMagnetisation;
 import lodebook.assembly.layout.RingDesign;
 
 /// The kinds of surveys that are tried on every ring.
@@ -32,6 +33,8 @@ final class TrialLines {
     lines.put("missing", one(design, FaultKind.MISSING, 0));
     lines.put("weak 0.6", one(design, FaultKind.WEAK, 0.6));
     lines.put("weak 0.8", one(design, FaultKind.WEAK, 0.8));
+    lines.put("60 % read, 1 reversed", cutOff(design, List.of(reversed)));
+    lines.put("60 % read, right", cutOff(design, List.of()));
     lines.put("60 % filled, right", Trials.faults(design, part, List.of()));
     lines.put("60 % filled, 1 reversed", Trials.faults(design, part, List.of(reversed)));
     lines.put("60 % filled, 2 reversed", Trials.faults(design, part, List.of(reversed, reversed)));
@@ -73,6 +76,21 @@ final class TrialLines {
     return lines;
   }
 
+  /// A full ring whose survey was cut off after 60 % of its slots: nothing can be said of the
+  /// magnets that nobody read, so a right ring is "cannot tell", and one fault among what was read
+  /// is right.
+  private static BiFunction<SplittableRandom, Integer, Trials.Trial> cutOff(
+      RingDesign design, List<Fault> kinds) {
+    int part = (int) Math.ceil(0.6 * design.slots());
+    var whole = Trials.faults(design, design.slots(), kinds);
+    return (random, i) -> {
+      Trials.Trial trial = whole.apply(random, i);
+      List<Reading> read =
+          trial.readings().stream().filter(reading -> reading.slot() <= part).toList();
+      return new Trials.Trial(trial.ring(), read, trial.faults(), trial.truth(), trial.measuring());
+    };
+  }
+
   private static BiFunction<SplittableRandom, Integer, Trials.Trial> one(
       RingDesign design, FaultKind kind, double amount) {
     return Trials.faults(design, design.slots(), List.of(new Fault(0, kind, amount)));
@@ -89,10 +107,11 @@ final class TrialLines {
 
   private static BiFunction<SplittableRandom, Integer, Trials.Trial> slip(
       RingDesign design, Function<SplittableRandom, Measuring> which) {
+    MutualMagnetisation mutual = MutualMagnetisation.of(design);
     return (random, i) -> {
       Measuring measuring = which.apply(random);
       Slip slip = new Slip(measuring, false);
-      RingTruth truth = new RingTruth(design, design.slots(), List.of(), random);
+      RingTruth truth = new RingTruth(design, mutual, design.slots(), List.of(), random);
       double gain = Trials.METER.accuracy() * random.nextGaussian();
       return new Trials.Trial(
           truth.recorded(),
@@ -106,8 +125,9 @@ final class TrialLines {
   /// A right ring with one reading whose sign, decimal point or digits are wrong: off by more than
   /// half of the largest reading.
   private static BiFunction<SplittableRandom, Integer, Trials.Trial> wild(RingDesign design) {
+    MutualMagnetisation mutual = MutualMagnetisation.of(design);
     return (random, i) -> {
-      RingTruth truth = new RingTruth(design, design.slots(), List.of(), random);
+      RingTruth truth = new RingTruth(design, mutual, design.slots(), List.of(), random);
       double gain = Trials.METER.accuracy() * random.nextGaussian();
       List<Reading> readings = new ArrayList<>(truth.read(design.slots(), Trials.METER, gain, 0));
       double largest =
@@ -124,9 +144,9 @@ final class TrialLines {
 
   /// The shop's own check: a magnet is called reversed where its slot's largest expected reading
   /// has the wrong sign.
-  static Set<Integer> bySigns(Trials.Trial trial) {
+  static Set<Integer> bySigns(Trials.Trial trial, ProbeResponses responses) {
     List<ExpectedReading> expected =
-        new ExpectedReadings(trial.ring(), Trials.METER)
+        new ExpectedReadings(trial.ring(), Trials.METER, responses)
             .at(trial.readings().stream().map(Reading::point).toList());
     Map<Integer, Double> most = new LinkedHashMap<>();
     Set<Integer> called = new TreeSet<>();

@@ -56,21 +56,26 @@ final class Trials {
   private Trials() {}
 
   static Count run(int count, long seed, BiFunction<SplittableRandom, Integer, Trial> make) {
+    return run(count, seed, new HashMap<>(), make);
+  }
+
+  /// @param shared responses of designs, kept between lines
+  static Count run(
+      int count,
+      long seed,
+      Map<RingDesign, ProbeResponses> shared,
+      BiFunction<SplittableRandom, Integer, Trial> make) {
     int right = 0;
     int doubted = 0;
     int drowned = 0;
     int unsure = 0;
     List<String> wrong = new ArrayList<>();
     List<String> unsureOnes = new ArrayList<>();
-    Map<RingDesign, ProbeResponses> shared = new HashMap<>();
     for (int i = 0; i < count; i++) {
       Trial trial = make.apply(new SplittableRandom(seed + i), i);
+      ProbeResponses responses = shared.computeIfAbsent(trial.ring().design(), ProbeResponses::new);
       Diagnosis said =
-          new SurveyExplainer(
-                  trial.ring(),
-                  Priors.DEFAULT,
-                  shared.computeIfAbsent(trial.ring().design(), ProbeResponses::new))
-              .explain(trial.readings());
+          new SurveyExplainer(trial.ring(), Priors.DEFAULT, responses).explain(trial.readings());
       if (isRight(trial, said)) {
         right++;
       } else if (said.verdict() == Verdict.CANNOT_TELL) {
@@ -78,7 +83,7 @@ final class Trials {
         unsureOnes.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
       } else if (isDoubted(trial, said)) {
         doubted++;
-      } else if (isDrowned(trial, said)) {
+      } else if (isDrowned(trial, said, responses)) {
         drowned++;
       } else {
         wrong.add("seed " + (seed + i) + ": " + trial.truth() + " but " + brief(said));
@@ -134,12 +139,12 @@ final class Trials {
 
   /// Whether a ring with a weak magnet passed that the readings, each weighed with the covariance
   /// of the truth, make less than 20 times as likely as a right ring.
-  private static boolean isDrowned(Trial trial, Diagnosis said) {
+  private static boolean isDrowned(Trial trial, Diagnosis said, ProbeResponses responses) {
     boolean weak = trial.faults().stream().anyMatch(f -> f.kind() == FaultKind.WEAK);
     if (!weak || said.verdict() != Verdict.PASS) {
       return false;
     }
-    RingModel ring = new RingModel(trial.ring(), new ProbeResponses(trial.ring().design()));
+    RingModel ring = new RingModel(trial.ring(), responses);
     RowModel rows = new RowModel(ring, Slip.NONE.rows(trial.readings(), ring.layout()));
     double gain =
         logLikelihood(rows, new Explanation(trial.faults()))
@@ -181,7 +186,23 @@ final class Trials {
   /// Surveys of a ring with some faults of given kinds in random slots.
   static BiFunction<SplittableRandom, Integer, Trial> faults(
       RingDesign design, int filled, List<Fault> kinds) {
-    MutualMagnetisation mutual = MutualMagnetisation.of(design);
+    return faults(design, design, filled, kinds, 0, 0);
+  }
+
+  /// The same where the ring really is another one than the record says, or is read otherwise.
+  ///
+  /// @param really the ring as it is
+  /// @param recordedAs what the explainer takes it for
+  /// @param gainOff gain error on top of the meter's own
+  /// @param outwards how much farther out than stated the probe always stands, metres
+  static BiFunction<SplittableRandom, Integer, Trial> faults(
+      RingDesign really,
+      RingDesign recordedAs,
+      int filled,
+      List<Fault> kinds,
+      double gainOff,
+      double outwards) {
+    MutualMagnetisation mutual = MutualMagnetisation.of(really);
     return (random, i) -> {
       List<Integer> slots = new ArrayList<>();
       while (slots.size() < kinds.size()) {
@@ -194,11 +215,11 @@ final class Trials {
       for (int k = 0; k < kinds.size(); k++) {
         faults.add(new Fault(slots.get(k), kinds.get(k).kind(), kinds.get(k).amount()));
       }
-      RingTruth truth = new RingTruth(design, mutual, filled, faults, random);
-      double gain = METER.accuracy() * random.nextGaussian();
+      RingTruth truth = new RingTruth(really, mutual, filled, faults, random);
+      double gain = METER.accuracy() * random.nextGaussian() + gainOff;
       return new Trial(
-          truth.recorded(),
-          truth.read(filled, METER, gain, 0),
+          new SurveyedRing(recordedAs, truth.recorded().magnets()),
+          truth.read(filled, METER, gain, outwards),
           faults,
           words(faults),
           Measuring.AS_SET);

@@ -5,12 +5,17 @@ import lodebook.assembly.layout.Focus;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.Probe;
 import lodebook.assembly.layout.Spread;
+import lodebook.assembly.survey.ProbeReport;
+import lodebook.db.book.Book;
 import lodebook.db.layouts.LayoutRevision;
 import lodebook.db.layouts.LayoutWords;
 import lodebook.db.layouts.Layouts;
 import lodebook.db.layouts.Released;
+import lodebook.db.stock.Grades;
 import lodebook.reports.words.FacingWords;
+import lodebook.ui.craft.ProbedLayout;
 import lodebook.ui.words.Amounts;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Parameters;
 
@@ -30,64 +35,75 @@ final class LayoutShow extends Verb {
   @Override
   int run() {
     LayoutRevision found = session.read(book -> new Layouts(book).show(name));
-    if (!session.json(json(found))) {
-      session.say(text(found));
+    ProbeReport told = found.draft() ? null : session.read(this::told);
+    if (!session.json(
+        json(found).putIfAny("probeTells", told == null ? null : ProbeJson.brief(told)))) {
+      session.say(text(found, told));
     }
     return 0;
   }
 
-  private String text(LayoutRevision found) {
+  private ProbeReport told(Book book) {
+    return ProbedLayout.of(new Layouts(book).design(name), new Grades(book).list()).ofLayout();
+  }
+
+  private String text(LayoutRevision found, @Nullable ProbeReport told) {
     Layout layout = found.layout();
     Spread spread = layout.spread();
     FacingWords facings = new FacingWords(session.words().locale());
     Double minutes = layout.adhesiveWorkingMinutes();
-    return new Table("LAYOUT", shown(layout) + ", " + state(found, session))
-        .row(
-            "slots",
-            layout.slots()
-                + ": "
-                + layout.polePairs()
-                + " pole pairs, "
-                + layout.segmentsPerPolePair()
-                + " magnets each, focus "
-                + word(layout.focus()))
-        .row(
-            "numbering",
-            layout.numbering().name().toLowerCase(Locale.ROOT)
-                + ", slot 1 at "
-                + Amounts.degrees(layout.firstSlotClockDegrees())
-                + " deg from 12 o'clock")
-        .row("slot 1", facings.of(layout, 1, layout.firstFacing()))
-        .row("slot 2", facings.of(layout, 2, layout.ruleFacing(2)))
-        .row("radius", Amounts.millimetres(layout.slotRadiusMetres()) + " mm to the magnets")
-        .row(
-            "magnets",
-            layout.magnetType()
-                + (layout.sideMagnetType() == null
-                    ? ""
-                    : ", along the ring " + layout.sideMagnetType()))
-        .row("working at", Amounts.millimetres(layout.workingRadiusMetres()) + " mm")
-        .row("probe", probe(layout.probe()))
-        .row(
-            "spread",
-            "pocket "
-                + Amounts.millimetres(spread.pocketMetres())
-                + " mm, facing "
-                + Amounts.degrees(spread.facingDegrees())
-                + " deg, probe "
-                + Amounts.millimetres(spread.probeMetres())
-                + " mm, tilt "
-                + Amounts.degrees(spread.probeTiltDegrees())
-                + " deg")
-        .row(
-            "adhesive",
-            layout.adhesive() + (minutes == null ? "" : ", " + Amounts.plain(minutes) + " min"))
-        .row("bodies turn", layout.bodyTurns() ? "yes" : "no")
-        .row("insert from", layout.insertFrom().name().toLowerCase(Locale.ROOT))
-        .row(
-            "tolerance",
-            Amounts.percent(layout.workingAmplitudeTolerance()) + " % of the working amplitude")
-        .text();
+    Table table =
+        new Table("LAYOUT", shown(layout) + ", " + state(found, session))
+            .row(
+                "slots",
+                layout.slots()
+                    + ": "
+                    + layout.polePairs()
+                    + " pole pairs, "
+                    + layout.segmentsPerPolePair()
+                    + " magnets each, focus "
+                    + word(layout.focus()))
+            .row(
+                "numbering",
+                layout.numbering().name().toLowerCase(Locale.ROOT)
+                    + ", slot 1 at "
+                    + Amounts.degrees(layout.firstSlotClockDegrees())
+                    + " deg from 12 o'clock")
+            .row("slot 1", facings.of(layout, 1, layout.firstFacing()))
+            .row("slot 2", facings.of(layout, 2, layout.ruleFacing(2)))
+            .row("radius", Amounts.millimetres(layout.slotRadiusMetres()) + " mm to the magnets")
+            .row(
+                "magnets",
+                layout.magnetType()
+                    + (layout.sideMagnetType() == null
+                        ? ""
+                        : ", along the ring " + layout.sideMagnetType()))
+            .row("working at", Amounts.millimetres(layout.workingRadiusMetres()) + " mm")
+            .row("probe", probe(layout.probe()))
+            .row(
+                "spread",
+                "pocket "
+                    + Amounts.millimetres(spread.pocketMetres())
+                    + " mm, facing "
+                    + Amounts.degrees(spread.facingDegrees())
+                    + " deg, probe "
+                    + Amounts.millimetres(spread.probeMetres())
+                    + " mm, tilt "
+                    + Amounts.degrees(spread.probeTiltDegrees())
+                    + " deg")
+            .row(
+                "adhesive",
+                layout.adhesive() + (minutes == null ? "" : ", " + Amounts.plain(minutes) + " min"))
+            .row("bodies turn", layout.bodyTurns() ? "yes" : "no")
+            .row("insert from", layout.insertFrom().name().toLowerCase(Locale.ROOT))
+            .row(
+                "tolerance",
+                Amounts.percent(layout.workingAmplitudeTolerance())
+                    + " % of the working amplitude");
+    if (told != null) {
+      table.row("probe tells", new ProbeWords(session.words()).sentence(told));
+    }
+    return table.text();
   }
 
   private static String probe(Probe probe) {

@@ -72,6 +72,7 @@ final class Nouns {
         new LayoutList(s),
         new LayoutShow(s),
         new LayoutRelease(s),
+        new LayoutProbe(s),
         new LayoutPicture(s));
   }
 

@@ -11,6 +11,7 @@ import lodebook.assembly.survey.ExpectedReading;
 import lodebook.assembly.survey.ExpectedReadings;
 import lodebook.assembly.survey.Meter;
 import lodebook.assembly.survey.PlacedMagnet;
+import lodebook.assembly.survey.ProbeResponses;
 import lodebook.assembly.survey.SurveyedRing;
 import lodebook.db.builds.PlannedSlot;
 
@@ -21,6 +22,7 @@ public final class Expectations {
   private static final Meter METER = new Meter("", 0.01, 0);
 
   private final RingDesign design;
+  private final ProbeResponses responses;
   private final Map<String, Grade> grades = new HashMap<>();
   private final Map<Integer, List<ExpectedReading>> finished = new HashMap<>();
   private final Map<Integer, List<ExpectedReading>> whenPlaced = new HashMap<>();
@@ -35,6 +37,7 @@ public final class Expectations {
       Map<Integer, Strength> standing,
       List<PlannedSlot> planned) {
     this.design = design;
+    this.responses = new ProbeResponses(design);
     grades.forEach(g -> this.grades.put(g.name(), g));
     Map<Integer, PlacedMagnet> slots = new HashMap<>();
     standing.forEach((slot, strength) -> slots.put(slot, magnet(slot, strength)));
@@ -51,7 +54,7 @@ public final class Expectations {
   }
 
   private ExpectedReadings expected(Map<Integer, PlacedMagnet> slots) {
-    return new ExpectedReadings(new SurveyedRing(design, slots), METER);
+    return new ExpectedReadings(new SurveyedRing(design, slots), METER, responses);
   }
 
   private PlacedMagnet magnet(int slot, Strength strength) {
