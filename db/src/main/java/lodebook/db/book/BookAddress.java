@@ -45,10 +45,11 @@ public sealed interface BookAddress {
       return new Folder(Path.of(text));
     }
     if (!text.startsWith("jdbc:postgresql:")) {
-      throw Refusal.wrongInput("address.other-database", text.split(":", 3)[1]);
+      throw Refusal.wrongInput("address.other-database", text.split(":", 3)[1])
+          .remedy("lodebook help book create");
     }
     if (text.toLowerCase(Locale.ROOT).contains("password=")) {
-      throw Refusal.wrongInput("address.password");
+      throw Refusal.wrongInput("address.password").remedy("lodebook help book create");
     }
     return new Server(text);
   }

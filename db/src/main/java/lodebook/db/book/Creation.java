@@ -74,7 +74,8 @@ final class Creation {
     }
     try (Stream<Path> inside = Files.list(folder.path())) {
       if (inside.anyMatch(p -> !OURS.contains(String.valueOf(p.getFileName())))) {
-        throw Refusal.refused("book.folder-not-empty", folder.shown());
+        throw Refusal.refused("book.folder-not-empty", folder.shown())
+            .remedy("lodebook book create --book NEW-FOLDER");
       }
     }
   }

@@ -53,7 +53,8 @@ final class FileSystems {
   /// Refuses a type of file system that is known to be shared over a network.
   static void refuseType(BookAddress.Folder folder, String type) {
     if (NETWORK.contains(type.toLowerCase(Locale.ROOT)) || folder.shown().startsWith("\\\\")) {
-      throw Refusal.cannotOpen("book.network", folder.shown(), type);
+      throw Refusal.cannotOpen("book.network", folder.shown(), type)
+          .remedy("lodebook book create --book FOLDER-ON-A-LOCAL-DISK");
     }
   }
 }

@@ -29,7 +29,7 @@ public final class Upgrade {
     try (Book book = Opening.unchecked(address, visit)) {
       before = book.read(Upgrade::generation);
       if (before == Generation.CURRENT) {
-        throw Refusal.refused("upgrade.current", before);
+        throw Refusal.refused("upgrade.current", before).remedy("lodebook book info");
       }
       if (before > Generation.CURRENT) {
         Opening.checkGeneration(before);

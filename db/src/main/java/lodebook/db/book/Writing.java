@@ -78,14 +78,17 @@ public final class Writing {
 
   /// Refuses what the person's role may not do.
   public void require(Permission permission) {
+    require(permission, head.operation());
+  }
+
+  /// Refuses what the person's role may not do.
+  ///
+  /// @param what what the person wants to do, as a command
+  public void require(Permission permission, String what) {
     Person who = person();
     if (!permission.allows(who.role())) {
       throw Refusal.refused(
-              "role.not-permitted",
-              who.initials(),
-              who.role().word(),
-              head.operation(),
-              permission.words())
+              "role.not-permitted", who.initials(), who.role().word(), what, permission.words())
           .remedy("lodebook person list");
     }
   }

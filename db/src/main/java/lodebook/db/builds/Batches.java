@@ -45,7 +45,8 @@ public final class Batches {
   /// @param serials pattern of the rotors' serials, such as `R-{0001}`; null for `BATCH-{0001}`
   public Batch open(Act act, String batch, String gear, int gears, @Nullable String serials) {
     if (gears < 1 || gears > MOST) {
-      throw Refusal.wrongInput("batch.count", batch, gears, MOST);
+      throw Refusal.wrongInput("batch.count", batch, gears, MOST)
+          .remedy("lodebook help batch open");
     }
     String pattern = serials == null ? batch + "-{0001}" : serials;
     SerialPattern shape = SerialPattern.of(pattern);

@@ -18,14 +18,14 @@ public record MagnetName(String lot, @Nullable Long number) {
     }
     String number = text.substring(slash + 1).strip();
     if (!number.matches("[0-9]{1,9}") || Long.parseLong(number) == 0) {
-      throw Refusal.wrongInput("magnet.malformed", text);
+      throw Refusal.wrongInput("magnet.malformed", text).remedy("lodebook lot list");
     }
     return new MagnetName(checked(lot, text), Long.valueOf(number));
   }
 
   private static String checked(String lot, String text) {
     if (lot.isEmpty()) {
-      throw Refusal.wrongInput("magnet.malformed", text);
+      throw Refusal.wrongInput("magnet.malformed", text).remedy("lodebook lot list");
     }
     return lot;
   }

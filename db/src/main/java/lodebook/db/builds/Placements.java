@@ -39,7 +39,7 @@ public final class Placements {
   /// before stays on record, superseded. A plan isn't needed.
   public Placed place(Act act, String rotor, List<PlaceRow> rows, PlaceHow how) {
     if (how.why().isBlank() && (how.deviation() || how.change() != Change.NONE)) {
-      throw Refusal.wrongInput("place.why-missing", rotor);
+      throw Refusal.wrongInput("place.why-missing", rotor).remedy("lodebook help place");
     }
     RowsRefused.throwIfAny(PlaceChecks.inThemselves(rows));
     return book.write(
@@ -48,7 +48,7 @@ public final class Placements {
 
   private static Placed placeIn(Writing writing, String code, List<PlaceRow> rows, PlaceHow how) {
     if (how.deviation()) {
-      writing.require(Permission.LEAD);
+      writing.require(Permission.LEAD, "place --deviation");
     }
     DSLContext sql = writing.sql();
     RotorRecord row = Rotors.require(sql, code);

@@ -111,7 +111,8 @@ public final class Rotors {
   /// is free again.
   public Rotor scrap(Act act, String code, String why) {
     if (why.isBlank()) {
-      throw Refusal.wrongInput("rotor.scrap-why", code);
+      throw Refusal.wrongInput("rotor.scrap-why", code)
+          .remedy("lodebook rotor scrap " + code + " --why TEXT");
     }
     return book.write(act, Permission.LEAD, "rotor scrap", writing -> scrapIn(writing, code, why));
   }

@@ -23,7 +23,7 @@ record SerialPattern(String prefix, long first, int digits, String suffix) {
   static SerialPattern of(String text) {
     Matcher matcher = SHAPE.matcher(text);
     if (!matcher.matches()) {
-      throw Refusal.wrongInput("batch.pattern", text);
+      throw Refusal.wrongInput("batch.pattern", text).remedy("lodebook help batch open");
     }
     SerialPattern pattern =
         new SerialPattern(

@@ -91,7 +91,7 @@ public final class Codes {
 
   private static String listing(CodeKind kind) {
     return switch (kind) {
-      case TRAY -> "lodebook history";
+      case TRAY -> "lodebook piece list LOT";
       case SURVEY -> "lodebook rotor list";
       default -> "lodebook " + kind.word() + " list";
     };

@@ -43,7 +43,7 @@ public final class Backup {
   /// not there.
   public Head write(Path file) {
     if (Files.exists(file)) {
-      throw Refusal.refused("backup.exists", file);
+      throw Refusal.refused("backup.exists", file).remedy("lodebook book backup NEW-FILE.zip");
     }
     Path part = file.resolveSibling(file.getFileName() + ".part");
     try {
@@ -64,7 +64,8 @@ public final class Backup {
       Files.createDirectories(folder);
       try (var inside = Files.list(folder)) {
         if (inside.findAny().isPresent()) {
-          throw Refusal.refused("export.not-empty", folder);
+          throw Refusal.refused("export.not-empty", folder)
+              .remedy("lodebook book export NEW-FOLDER");
         }
       }
       book.read(sql -> sql.connectionResult(c -> csvs(c, folder)));

@@ -21,7 +21,7 @@ public record Head(long sequence, String digits) {
   public static Head parse(String printed) {
     Matcher parts = PRINTED.matcher(printed.strip().toLowerCase(java.util.Locale.ROOT));
     if (!parts.matches()) {
-      throw Refusal.wrongInput("head.malformed", printed);
+      throw Refusal.wrongInput("head.malformed", printed).remedy("lodebook book info");
     }
     return new Head(Long.parseLong(parts.group(1)), parts.group(2));
   }

@@ -30,7 +30,7 @@ public final class Restore {
   /// book has one line of history more, which says from which head it was restored.
   public static Head restore(Path file, BookAddress address, Visit visit, Act act) {
     if (!Files.isRegularFile(file)) {
-      throw Refusal.wrongInput("backup.none", file);
+      throw Refusal.wrongInput("backup.none", file).remedy("lodebook help book restore");
     }
     try (ZipFile zip = new ZipFile(file.toFile())) {
       Manifest manifest = manifest(zip, file);

@@ -51,7 +51,7 @@ public final class Settings {
       throw unknown(name);
     }
     if (content.isBlank() || content.length() > LONGEST) {
-      throw Refusal.wrongInput("setting.length", name, LONGEST);
+      throw Refusal.wrongInput("setting.length", name, LONGEST).remedy("lodebook book setting");
     }
     book.run(
         act,

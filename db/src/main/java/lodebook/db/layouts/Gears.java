@@ -17,10 +17,13 @@ import lodebook.db.code.CodeKind;
 import lodebook.db.code.CodeText;
 import lodebook.db.code.Codes;
 import lodebook.db.refusal.Refusal;
+import lodebook.db.refusal.RowProblem;
+import lodebook.db.refusal.RowsRefused;
 import lodebook.db.rights.Permission;
 import lodebook.db.tables.tables.records.GearReleaseRecord;
 import lodebook.db.tables.tables.records.GearRevisionRecord;
 import org.jooq.DSLContext;
+import org.jspecify.annotations.Nullable;
 
 /// Importing, listing and releasing gear models.
 public final class Gears {
@@ -45,8 +48,8 @@ public final class Gears {
 
   private static GearRevision importInto(Writing writing, GearDraft draft) {
     DSLContext sql = writing.sql();
-    LayoutRevision inner = Layouts.find(sql, draft.inner());
-    LayoutRevision outer = Layouts.find(sql, draft.outer());
+    LayoutRevision inner = RowsRefused.at(0, "inner", () -> Layouts.find(sql, draft.inner()));
+    LayoutRevision outer = RowsRefused.at(0, "outer", () -> Layouts.find(sql, draft.outer()));
     Code code = Codes.find(sql, draft.code());
     GearRevision before = null;
     if (code != null && code.kind() == CodeKind.GEAR) {
@@ -56,10 +59,7 @@ public final class Gears {
         }
       }
     }
-    if (before != null && !before.draft()) {
-      throw Refusal.refused("gear.released", before.name())
-          .remedy("lodebook gear show " + before.name());
-    }
+    refuseReleased(before);
     GearRevisionRecord row =
         before == null
             ? sql.newRecord(GEAR_REVISION)
@@ -70,13 +70,15 @@ public final class Gears {
     if (before == null) {
       row.setId(writing.newId());
       row.setGearId(
-          code != null && code.kind() == CodeKind.GEAR ? code.id() : begin(writing, draft.code()));
+          code != null && code.kind() == CodeKind.GEAR
+              ? code.id()
+              : RowsRefused.at(0, "gear", () -> begin(writing, draft.code())));
     } else {
       row.setRevision(before.model().revision());
     }
     row.store();
     GearRevision after = byId(sql, row.getId());
-    refuseFaults(after);
+    RowsRefused.throwIfAny(faults(after));
     tell(writing, after, inner, outer);
     return after;
   }
@@ -93,11 +95,20 @@ public final class Gears {
     return id;
   }
 
-  private static void refuseFaults(GearRevision revision) {
-    List<String> faults = GearRule.faults(revision.model());
-    if (!faults.isEmpty()) {
-      throw Refusal.wrongInput("gear.faults", String.join("\n", faults));
+  private static void refuseReleased(@Nullable GearRevision before) {
+    if (before != null && !before.draft()) {
+      Refusal refusal =
+          Refusal.refused("gear.released", before.name())
+              .remedy("lodebook gear show " + before.name());
+      throw new RowsRefused(List.of(new RowProblem(0, "revision", refusal)));
     }
+  }
+
+  /// What is wrong with a model; each sentence names the key at fault.
+  private static List<RowProblem> faults(GearRevision revision) {
+    return GearRule.faults(revision.model()).stream()
+        .map(fault -> new RowProblem(0, "", Refusal.wrongInput("gear.faults", fault)))
+        .toList();
   }
 
   private static void tell(
@@ -140,7 +151,7 @@ public final class Gears {
   private static GearRevision releaseIn(Writing writing, String text) {
     DSLContext sql = writing.sql();
     GearRevision draft = draftOf(sql, text);
-    refuseFaults(draft);
+    RowsRefused.throwIfAny(faults(draft));
     for (long layout : List.of(draft.innerLayoutId(), draft.outerLayoutId())) {
       LayoutRevision revision = Layouts.byId(sql, layout);
       if (revision.draft()) {

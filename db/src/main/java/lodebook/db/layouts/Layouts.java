@@ -5,8 +5,10 @@ import static lodebook.db.tables.Tables.LAYOUT_RELEASE;
 import static lodebook.db.tables.Tables.LAYOUT_REVISION;
 import static org.jooq.impl.DSL.noCondition;
 
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.RingDesign;
 import lodebook.db.book.Act;
@@ -17,6 +19,8 @@ import lodebook.db.code.CodeKind;
 import lodebook.db.code.CodeText;
 import lodebook.db.code.Codes;
 import lodebook.db.refusal.Refusal;
+import lodebook.db.refusal.RowProblem;
+import lodebook.db.refusal.RowsRefused;
 import lodebook.db.rights.Permission;
 import lodebook.db.tables.tables.records.LayoutReleaseRecord;
 import lodebook.db.tables.tables.records.LayoutRevisionRecord;
@@ -37,29 +41,56 @@ public final class Layouts {
   public LayoutRevision importDraft(Act act, Layout layout) {
     RevisionName.checkRevision(layout.code(), layout.revision());
     return book.write(
-        act, Permission.DESIGN, "layout import", writing -> importInto(writing, layout));
+        act,
+        Permission.DESIGN,
+        "layout import",
+        writing -> {
+          LayoutRevision taken = importInto(writing, 0, layout);
+          refuseFaults(writing.sql(), taken);
+          return taken;
+        });
   }
 
   /// Takes in several revisions as [#importDraft(Act, Layout)] does, all or none.
+  ///
+  /// @throws RowsRefused with everything that is wrong, a row for each layout
   public List<LayoutRevision> importDrafts(Act act, List<Layout> layouts) {
     layouts.forEach(l -> RevisionName.checkRevision(l.code(), l.revision()));
     return book.write(
         act,
         Permission.DESIGN,
         "layout import",
-        writing -> layouts.stream().map(l -> importInto(writing, l)).toList());
+        writing -> {
+          List<LayoutRevision> taken = new ArrayList<>();
+          List<RowProblem> problems = new ArrayList<>();
+          for (int i = 0; i < layouts.size(); i++) {
+            try {
+              taken.add(importInto(writing, i, layouts.get(i)));
+              for (String fault : design(writing.sql(), taken.getLast()).faults()) {
+                problems.add(new RowProblem(i, "", Refusal.wrongInput("layout.faults", fault)));
+              }
+            } catch (RowsRefused refused) {
+              problems.addAll(refused.problems());
+            }
+          }
+          RowsRefused.throwIfAny(problems);
+          return taken;
+        });
   }
 
-  private static LayoutRevision importInto(Writing writing, Layout layout) {
+  private static LayoutRevision importInto(Writing writing, int index, Layout layout) {
     DSLContext sql = writing.sql();
-    long typeId = TypesOfLayouts.id(sql, layout.name(), layout.magnetType());
+    String name = layout.name();
     String side = layout.sideMagnetType();
-    long sideTypeId = side == null ? typeId : TypesOfLayouts.id(sql, layout.name(), side);
-    LayoutRevision before = findRevision(sql, layout.code(), layout.revision());
-    if (before != null && !before.draft()) {
-      throw Refusal.refused("layout.released", before.layout().name())
-          .remedy("lodebook layout show " + before.layout().name());
-    }
+    long typeId =
+        RowsRefused.at(
+            index, "magnetType", () -> TypesOfLayouts.id(sql, name, layout.magnetType()));
+    long sideTypeId =
+        side == null
+            ? typeId
+            : RowsRefused.at(index, "sideMagnetType", () -> TypesOfLayouts.id(sql, name, side));
+    LayoutRevision before =
+        RowsRefused.at(index, "revision", () -> draftOrNothing(sql, layout)).orElse(null);
     LayoutRevisionRecord row =
         before == null
             ? sql.newRecord(LAYOUT_REVISION)
@@ -69,15 +100,23 @@ public final class Layouts {
     row.setHistorySequence(writing.sequence());
     if (before == null) {
       row.setId(writing.newId());
-      row.setLayoutId(layoutId(writing, layout.code()));
+      row.setLayoutId(RowsRefused.at(index, "layout", () -> layoutId(writing, layout.code())));
     } else {
       row.setRevision(before.layout().revision());
     }
     row.store();
     LayoutRevision after = byId(sql, row.getId());
-    refuseFaults(sql, after);
     LayoutLines.write(writing.line(), after.layout());
     return after;
+  }
+
+  private static Optional<LayoutRevision> draftOrNothing(DSLContext sql, Layout layout) {
+    LayoutRevision before = findRevision(sql, layout.code(), layout.revision());
+    if (before != null && !before.draft()) {
+      throw Refusal.refused("layout.released", before.layout().name())
+          .remedy("lodebook layout show " + before.layout().name());
+    }
+    return Optional.ofNullable(before);
   }
 
   private static long layoutId(Writing writing, String code) {

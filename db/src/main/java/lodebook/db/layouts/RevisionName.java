@@ -17,7 +17,7 @@ public record RevisionName(String code, @Nullable String revision) {
     String code = (at < 0 ? text : text.substring(0, at)).strip();
     String revision = at < 0 ? null : text.substring(at + 1).strip();
     if (code.isEmpty() || (revision != null && revision.isEmpty())) {
-      throw Refusal.wrongInput("revision.malformed", text);
+      throw Refusal.wrongInput("revision.malformed", text).remedy("lodebook layout list");
     }
     return new RevisionName(code, revision);
   }

@@ -32,9 +32,9 @@ public final class Meters {
   /// negative, and the accuracy is below 1.
   public void add(Act act, Meter meter) {
     CodeText.check(meter.code());
-    checkRange(meter.code(), "accuracy", meter.accuracyRelative(), 1);
-    checkRange(meter.code(), "floor", meter.floorTesla(), 10);
-    checkRange(meter.code(), "sensing depth", meter.sensingDepthMetres(), 1);
+    checkRange(meter.code(), "meter.accuracy", 100 * meter.accuracyRelative(), 100);
+    checkRange(meter.code(), "meter.floor", 1000 * meter.floorTesla(), 10_000);
+    checkRange(meter.code(), "meter.depth", 1000 * meter.sensingDepthMetres(), 1000);
     book.run(act, Permission.INSPECT, "meter add", writing -> insert(writing, meter));
   }
 
@@ -116,9 +116,10 @@ public final class Meters {
         .field("calibrationDue", meter.calibrationDue());
   }
 
-  private static void checkRange(String code, String what, double number, double below) {
+  private static void checkRange(String code, String key, double number, int below) {
     if (!(number >= 0 && number < below)) {
-      throw Refusal.wrongInput("meter.range", code, what, number, below);
+      throw Refusal.wrongInput(key, code, Math.rint(number * 1e6) / 1e6, below)
+          .remedy("lodebook help meter add");
     }
   }
 }

@@ -1,23 +1,15 @@
 package lodebook.db.refusal;
 
-import java.text.MessageFormat;
 import java.util.Locale;
-import java.util.ResourceBundle;
 
 /// Turns notices and refusals into sentences of one language.
 public final class Sentences {
   private static final String BUNDLE = "lodebook.db.messages";
 
-  private final ResourceBundle bundle;
-  private final Locale locale;
+  private final Phrases phrases;
 
   private Sentences(Locale locale) {
-    this.locale = locale;
-    this.bundle =
-        ResourceBundle.getBundle(
-            BUNDLE,
-            locale,
-            ResourceBundle.Control.getNoFallbackControl(ResourceBundle.Control.FORMAT_PROPERTIES));
+    this.phrases = new Phrases(BUNDLE, locale);
   }
 
   /// Sentences in a language; English where there is no translation.
@@ -32,8 +24,7 @@ public final class Sentences {
 
   /// The notice in words.
   public String say(Notice notice) {
-    return new MessageFormat(bundle.getString(notice.key()), locale)
-        .format(notice.arguments().toArray());
+    return phrases.say(notice.key(), notice.arguments());
   }
 
   /// The refusal in words, without its remedy.

@@ -89,7 +89,8 @@ public final class LotDecisions {
   /// fewer than have a number.
   public void count(Act act, String lot, int count, String why) {
     if (count < 1) {
-      throw Refusal.wrongInput("lot.count", count);
+      throw Refusal.wrongInput("lot.count", count)
+          .remedy("lodebook lot count " + lot + " N --why TEXT");
     }
     book.run(
         act,

@@ -36,7 +36,7 @@ public final class PieceDecisions {
         "piece hold",
         writing -> {
           PieceRecord row = find(writing, piece);
-          refuseIf(row, piece, PieceState.HELD, "free");
+          refuseIf(row, piece, PieceState.HELD, "free " + piece + " --why TEXT");
           standsBeforeHold(writing.sql(), row.getId(), true);
           change(writing, row, piece, PieceState.HELD, why);
         });
@@ -116,14 +116,13 @@ public final class PieceDecisions {
 
   private static PieceRecord find(Writing writing, PieceName piece) {
     PieceRecord row = Pieces.require(writing.sql(), piece);
-    refuseIf(row, piece, PieceState.SCRAPPED, "show");
+    refuseIf(row, piece, PieceState.SCRAPPED, "show " + piece);
     return row;
   }
 
   private static void refuseIf(PieceRecord row, PieceName piece, PieceState state, String command) {
     if (row.getState().equals(state.word())) {
-      throw Refusal.refused("piece." + state.word(), piece)
-          .remedy("lodebook piece " + command + " " + piece);
+      throw Refusal.refused("piece." + state.word(), piece).remedy("lodebook piece " + command);
     }
   }
 

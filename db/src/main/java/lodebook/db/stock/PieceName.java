@@ -16,7 +16,7 @@ public record PieceName(String lot, long number) {
   public static PieceName of(String text) {
     Matcher name = NAME.matcher(text.strip());
     if (!name.matches() || Long.parseLong(name.group(2)) == 0) {
-      throw Refusal.wrongInput("piece.malformed", text);
+      throw Refusal.wrongInput("piece.malformed", text).remedy("lodebook piece list LOT");
     }
     return new PieceName(name.group(1), Long.parseLong(name.group(2)));
   }

@@ -54,6 +54,7 @@ final class ReadingImport {
 
   /// Writes all rows behind the readings that the survey has; refuses all of them if one is wrong.
   void write(long surveyId, int readingsBefore, List<SurveyRow> rows) {
+    refuseCommonMeter(rows);
     List<ReadingRecord> records = new ArrayList<>();
     for (int i = 0; i < rows.size(); i++) {
       ReadingRecord record = check(i, rows.get(i));
@@ -66,6 +67,16 @@ final class ReadingImport {
     RowsRefused.throwIfAny(problems);
     writing.sql().batchInsert(records).execute();
     rows.forEach(this::tell);
+  }
+
+  /// The meter of rows that name none is refused once and not row by row.
+  private void refuseCommonMeter(List<SurveyRow> rows) {
+    if (meter != null && rows.stream().anyMatch(row -> row.meter() == null)) {
+      Refusal refusal = unusable(meter);
+      if (refusal != null) {
+        throw refusal;
+      }
+    }
   }
 
   private @Nullable ReadingRecord check(int index, SurveyRow row) {
@@ -113,30 +124,36 @@ final class ReadingImport {
       problem(index, "meter", Refusal.wrongInput("survey.no-meter"));
       return null;
     }
-    Code code = meters.get(CodeText.fold(named));
-    if (code == null || code.kind() != CodeKind.METER) {
-      problem(
-          index,
-          "meter",
-          code == null
-              ? Codes.unknown(named, CodeKind.METER)
-              : Codes.wrongKind(code, CodeKind.METER));
+    Refusal refusal = unusable(named);
+    if (refusal != null) {
+      problem(index, "meter", refusal);
       return null;
     }
-    MeterRecord gauge = Objects.requireNonNull(meterRows.get(code.id()));
-    if (!gauge.getKind().equals("field")) {
-      problem(
-          index,
-          "meter",
-          Refusal.refused("survey.meter-kind", code.shown(), gauge.getKind())
-              .remedy("lodebook meter list"));
-    } else if (gauge.getRetired()) {
-      problem(
-          index,
-          "meter",
-          Refusal.refused("survey.meter-retired", code.shown()).remedy("lodebook meter list"));
+    return gauge(named);
+  }
+
+  /// Why a meter cannot have read a survey, or null where it can.
+  private @Nullable Refusal unusable(String named) {
+    Code code = meters.get(CodeText.fold(named));
+    if (code == null) {
+      return Codes.unknown(named, CodeKind.METER);
     }
-    return gauge;
+    if (code.kind() != CodeKind.METER) {
+      return Codes.wrongKind(code, CodeKind.METER);
+    }
+    MeterRecord gauge = gauge(named);
+    if (!gauge.getKind().equals("field")) {
+      return Refusal.refused("survey.meter-kind", code.shown(), gauge.getKind())
+          .remedy("lodebook meter list");
+    }
+    return gauge.getRetired()
+        ? Refusal.refused("survey.meter-retired", code.shown()).remedy("lodebook meter list")
+        : null;
+  }
+
+  private MeterRecord gauge(String named) {
+    Code code = Objects.requireNonNull(meters.get(CodeText.fold(named)));
+    return Objects.requireNonNull(meterRows.get(code.id()));
   }
 
   private void tell(SurveyRow row) {

@@ -143,7 +143,8 @@ public final class Surveys {
   /// Declares a survey void; what another person recorded only by a lead.
   public Survey declareVoid(Act act, String code, String why) {
     if (why.isBlank()) {
-      throw Refusal.wrongInput("survey.why", code);
+      throw Refusal.wrongInput("survey.why", code)
+          .remedy("lodebook survey void " + code + " --why TEXT");
     }
     return book.write(
         act,

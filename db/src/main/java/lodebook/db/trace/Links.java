@@ -17,7 +17,9 @@ import static lodebook.db.tables.Tables.UNIT;
 
 import java.time.Instant;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import org.jooq.Condition;
 import org.jooq.DSLContext;
 import org.jooq.Field;
@@ -33,7 +35,15 @@ final class Links {
   private final Things things;
 
   /// A thing and from when to when it belongs.
-  record Link(Thing thing, @Nullable Instant from, @Nullable Instant to) {}
+  ///
+  /// @param magnets how many unmeasured magnets it stands for, or null where it is no such
+  record Link(
+      Thing thing, @Nullable Instant from, @Nullable Instant to, @Nullable Integer magnets) {
+    /// A thing that belongs without beginning or end.
+    static Link always(Thing thing) {
+      return new Link(thing, null, null, null);
+    }
+  }
 
   Links(DSLContext sql, Things things) {
     this.sql = sql;
@@ -46,24 +56,14 @@ final class Links {
       case "unit" -> members(MEMBERSHIP.HOLDER_ID.eq(thing.id()), MEMBERSHIP.MEMBER_ID);
       case "batch" -> rotors(ROTOR.BATCH_ID.eq(thing.id()));
       case "rotor" -> magnets(thing.id());
-      case "lot" ->
-          things.supplierOf(thing).map(lot -> new Link(lot, null, null)).stream().toList();
+      case "lot" -> things.supplierOf(thing).map(Link::always).stream().toList();
       case "piece" ->
           plain(
               sql.select(PIECE.LOT_ID)
                   .from(PIECE)
                   .where(PIECE.ID.eq(thing.id()))
                   .fetch(PIECE.LOT_ID));
-      case "tray" ->
-          sql
-              .select(CELL_CONTENT.PIECE_ID)
-              .from(CELL_CONTENT)
-              .where(CELL_CONTENT.TRAY_ID.eq(thing.id()))
-              .orderBy(CELL_CONTENT.PIECE_ID)
-              .fetch(CELL_CONTENT.PIECE_ID)
-              .stream()
-              .map(piece -> new Link(things.piece(piece), null, null))
-              .toList();
+      case "tray" -> inTray(thing.id());
       case "survey" ->
           plain(
               sql.selectDistinct(READING.METER_ID)
@@ -78,8 +78,7 @@ final class Links {
   /// What a thing went into, one step.
   List<Link> wentInto(Thing thing) {
     return switch (thing.kind()) {
-      case "supplier lot" ->
-          things.supplied(thing.code()).stream().map(lot -> new Link(lot, null, null)).toList();
+      case "supplier lot" -> things.supplied(thing.code()).stream().map(Link::always).toList();
       case "lot" -> lotWentInto(thing.id());
       case "piece" -> placements(PLACEMENT.PIECE_ID.eq(thing.id()));
       case "rotor" -> rotorWentInto(thing.id());
@@ -90,16 +89,7 @@ final class Links {
                   .where(SURVEY.ID.eq(thing.id()))
                   .fetch(SURVEY.ROTOR_ID));
       case "meter" -> meterWentInto(thing.id());
-      case "tray" ->
-          sql
-              .select(CELL_CONTENT.PIECE_ID)
-              .from(CELL_CONTENT)
-              .where(CELL_CONTENT.TRAY_ID.eq(thing.id()))
-              .orderBy(CELL_CONTENT.PIECE_ID)
-              .fetch(CELL_CONTENT.PIECE_ID)
-              .stream()
-              .map(piece -> new Link(things.piece(piece), null, null))
-              .toList();
+      case "tray" -> inTray(thing.id());
       case "batch" ->
           plain(
               sql.select(UNIT.ID)
@@ -132,7 +122,7 @@ final class Links {
         .from(PLACEMENT)
         .where(PLACEMENT.LOT_ID.eq(lotId).and(PLACEMENT.PIECE_ID.isNotNull()))
         .orderBy(PLACEMENT.PIECE_ID)
-        .forEach(row -> links.add(new Link(things.piece(row.value1()), null, null)));
+        .forEach(row -> links.add(Link.always(things.piece(row.value1()))));
     links.removeIf(link -> placements(PLACEMENT.PIECE_ID.eq(link.thing().id())).isEmpty());
     links.addAll(placements(PLACEMENT.LOT_ID.eq(lotId).and(PLACEMENT.PIECE_ID.isNull())));
     return links;
@@ -158,7 +148,7 @@ final class Links {
         .from(PIECE_READING)
         .where(PIECE_READING.METER_ID.eq(meterId))
         .orderBy(PIECE_READING.PIECE_ID)
-        .forEach(row -> links.add(new Link(things.piece(row.value1()), null, null)));
+        .forEach(row -> links.add(Link.always(things.piece(row.value1()))));
     links.addAll(
         plain(
             sql.selectDistinct(READING.SURVEY_ID)
@@ -170,7 +160,7 @@ final class Links {
   }
 
   private List<Link> plain(List<Long> ids) {
-    return ids.stream().map(id -> new Link(things.of(id), null, null)).toList();
+    return ids.stream().map(id -> Link.always(things.of(id))).toList();
   }
 
   private List<Link> rotors(Condition condition) {
@@ -185,21 +175,35 @@ final class Links {
         .on(MEMBERSHIP_END.MEMBERSHIP_ID.eq(MEMBERSHIP.ID))
         .where(condition)
         .orderBy(MEMBERSHIP.ID)
-        .fetch(row -> new Link(things.of(row.value1()), row.value2(), row.value3()));
+        .fetch(row -> new Link(things.of(row.value1()), row.value2(), row.value3(), null));
   }
 
   private List<Link> magnets(long rotorId) {
-    return placed(PLACEMENT.ROTOR_ID.eq(rotorId))
-        .map(
-            row -> {
-              Long piece = row.get(PLACEMENT.PIECE_ID);
-              return link(
-                  row, piece == null ? things.of(row.get(PLACEMENT.LOT_ID)) : things.piece(piece));
-            });
+    return counted(
+        placed(PLACEMENT.ROTOR_ID.eq(rotorId))
+            .map(
+                row -> {
+                  Long piece = row.get(PLACEMENT.PIECE_ID);
+                  return link(
+                      row,
+                      piece == null ? things.of(row.get(PLACEMENT.LOT_ID)) : things.piece(piece));
+                }));
+  }
+
+  private List<Link> inTray(long trayId) {
+    return sql
+        .select(CELL_CONTENT.PIECE_ID)
+        .from(CELL_CONTENT)
+        .where(CELL_CONTENT.TRAY_ID.eq(trayId))
+        .orderBy(CELL_CONTENT.PIECE_ID)
+        .fetch(CELL_CONTENT.PIECE_ID)
+        .stream()
+        .map(piece -> Link.always(things.piece(piece)))
+        .toList();
   }
 
   private List<Link> placements(Condition condition) {
-    return placed(condition).map(row -> link(row, things.of(row.get(PLACEMENT.ROTOR_ID))));
+    return counted(placed(condition).map(row -> link(row, things.of(row.get(PLACEMENT.ROTOR_ID)))));
   }
 
   private org.jooq.Result<Record> placed(Condition condition) {
@@ -213,6 +217,32 @@ final class Links {
   }
 
   private static Link link(Record row, Thing thing) {
-    return new Link(thing, row.get(PLACEMENT.STATED_AT), row.get(PLACEMENT_END.STATED_AT));
+    return new Link(
+        thing,
+        row.get(PLACEMENT.STATED_AT),
+        row.get(PLACEMENT_END.STATED_AT),
+        row.get(PLACEMENT.PIECE_ID) == null ? 1 : null);
+  }
+
+  /// The unmeasured magnets of one lot in one rotor, until the same time, as one link from the
+  /// earliest time on.
+  private static List<Link> counted(List<Link> links) {
+    Map<Link, Link> together = new LinkedHashMap<>();
+    for (Link link : links) {
+      boolean counts = link.magnets() != null;
+      together.merge(
+          counts ? new Link(link.thing(), null, link.to(), 0) : link, link, Links::together);
+    }
+    return List.copyOf(together.values());
+  }
+
+  private static Link together(Link one, Link other) {
+    if (one.magnets() == null || other.magnets() == null) {
+      return one;
+    }
+    Instant from = one.from();
+    Instant since = other.from();
+    boolean earlier = from != null && since != null && since.isBefore(from);
+    return new Link(one.thing(), earlier ? since : from, one.to(), one.magnets() + other.magnets());
   }
 }

@@ -13,6 +13,7 @@ import org.jspecify.annotations.Nullable;
 /// @param state its state in a word, empty where it has none
 /// @param from since when it is or was part of the node above, or null where that has no meaning
 /// @param to until when, or null while it is
+/// @param magnets how many unmeasured magnets it stands for, or null where it is no such
 /// @param branches what it was made from or went into, in order
 public record TraceNode(
     String code,
@@ -21,6 +22,7 @@ public record TraceNode(
     String state,
     @Nullable Instant from,
     @Nullable Instant to,
+    @Nullable Integer magnets,
     List<TraceNode> branches) {
   public TraceNode {
     branches = List.copyOf(branches);

@@ -30,7 +30,7 @@ public final class Traces {
           List<TraceNode> others = new ArrayList<>();
           if (!thing.kind().equals("supplier lot")) {
             for (Thing lot : things.supplied(code)) {
-              others.add(node(new Link(lot, null, null), List.of()));
+              others.add(node(Link.always(lot), List.of()));
             }
           }
           Walk made = new Walk(links::madeFrom);
@@ -49,7 +49,14 @@ public final class Traces {
   private static TraceNode node(Link link, List<TraceNode> branches) {
     Thing thing = link.thing();
     return new TraceNode(
-        thing.code(), thing.kind(), thing.at(), thing.state(), link.from(), link.to(), branches);
+        thing.code(),
+        thing.kind(),
+        thing.at(),
+        thing.state(),
+        link.from(),
+        link.to(),
+        link.magnets(),
+        branches);
   }
 
   /// Follows links one way; each thing's branches are looked up once.

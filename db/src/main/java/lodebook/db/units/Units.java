@@ -47,7 +47,7 @@ public final class Units {
   public GearUnit assemble(
       Act act, String unit, String gear, String inner, String outer, @Nullable String override) {
     if (CodeText.fold(inner).equals(CodeText.fold(outer))) {
-      throw Refusal.wrongInput("unit.same-rotor", unit, inner);
+      throw Refusal.wrongInput("unit.same-rotor", unit, inner).remedy("lodebook rotor list");
     }
     return book.write(
         act,
@@ -65,7 +65,7 @@ public final class Units {
       @Nullable String override) {
     DSLContext sql = writing.sql();
     if (override != null) {
-      writing.require(Permission.LEAD);
+      writing.require(Permission.LEAD, "unit assemble --override");
     }
     GearRevision model = Gears.requireReleased(sql, gear);
     RotorRecord innerRow = Rotors.require(sql, inner);
@@ -177,7 +177,8 @@ public final class Units {
   /// Records that a unit came back, and with which complaint.
   public GearUnit takeBack(Act act, String unit, String complaint) {
     if (complaint.isBlank()) {
-      throw Refusal.wrongInput("unit.complaint", unit);
+      throw Refusal.wrongInput("unit.complaint", unit)
+          .remedy("lodebook unit return " + unit + " --complaint TEXT");
     }
     return book.write(
         act,

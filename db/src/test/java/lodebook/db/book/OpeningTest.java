@@ -87,11 +87,11 @@ class OpeningTest {
     assertRefused(
         "the address of a book holds no password; put it into the environment variable PGPASSWORD"
             + " or into a pgpass file",
-        null,
+        "lodebook help book create",
         () -> BookAddress.of("jdbc:postgresql://host/book?user=a&password=b"));
     assertRefused(
         "a book is a folder or a jdbc:postgresql: address, not jdbc:h2:",
-        null,
+        "lodebook help book create",
         () -> BookAddress.of("jdbc:h2:mem:x"));
   }
 
@@ -103,7 +103,7 @@ class OpeningTest {
             + folder
             + " stands on a network file system (NFS4), where locks do not hold; keep it on a"
             + " local disk, or on a PostgreSQL server if several computers use it",
-        null,
+        "lodebook book create --book FOLDER-ON-A-LOCAL-DISK",
         () -> FileSystems.refuseType(place, "NFS4"));
     FileSystems.refuseType(place, "ext4");
   }

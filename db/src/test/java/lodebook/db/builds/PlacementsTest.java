@@ -161,7 +161,7 @@ class PlacementsTest {
                       "1:slot: slot 1 stands twice in the file",
                       "2:piece: piece l-1/0001 stands twice in the file",
                       "3:piece: \"L-1/x\" names no magnet: write LOT/NUMBER for a piece, or LOT for"
-                          + " an unmeasured magnet of it"),
+                          + " an unmeasured magnet of it [lodebook lot list]"),
                   () ->
                       placements.place(
                           BENCH,
@@ -273,7 +273,7 @@ class PlacementsTest {
           () -> rotors.scrap(BENCH, "R-1", "cracked"));
       assertRefused(
           "say with --why for what reason rotor R-1 is scrapped",
-          null,
+          "lodebook rotor scrap R-1 --why TEXT",
           () -> rotors.scrap(LEAD, "R-1", ""));
       assertEquals("scrapped", rotors.scrap(LEAD, "R-1", "cracked").state());
       assertEquals(0, rotors.show("R-1").standing().size());

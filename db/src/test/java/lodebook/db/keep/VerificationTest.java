@@ -101,7 +101,7 @@ class VerificationTest {
   void rowsThatPointToNothingAreNamed(TestBook database) throws SQLException {
     assertFault(
         database,
-        "table piece_reading: 1 rows point to nothing (fk_piece_reading_meter)",
+        "table piece_reading: 1 row points to nothing (fk_piece_reading_meter)",
         "alter table piece_reading drop constraint fk_piece_reading_meter",
         "update piece_reading set meter_id = 999999 where meter_id is not null");
   }

@@ -164,7 +164,7 @@ class LayoutsTest {
               .kind());
       assertRefused(
           "\"RING@\" names no revision: write CODE or CODE@REVISION",
-          null,
+          "lodebook layout list",
           () -> layouts.show("RING@"));
       layouts.importDraft(PLANNER, inner("RING", "B"));
       assertRefused(

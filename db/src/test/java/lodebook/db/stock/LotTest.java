@@ -31,7 +31,7 @@ class LotTest {
 
       decide.hold(TestShop.BENCH, "L-2", "smells");
       assertRefused(
-          "lot L-2 is on hold",
+          "lot L-2 is on hold already",
           "lodebook lot free L-2 --why TEXT",
           () -> decide.accept(TestShop.LEAD, "L-2", "x"));
       assertRefused(
@@ -41,7 +41,7 @@ class LotTest {
       assertEquals(LotState.AWAITING, decide.free(Act.by("IN"), "L-2", "washed"));
       decide.accept(Act.by("IN"), "L-2", "fine");
       assertRefused(
-          "lot L-2 is accepted",
+          "lot L-2 is accepted already",
           "lodebook lot show L-2",
           () -> decide.accept(TestShop.LEAD, "L-2", "x"));
       decide.reject(Act.by("IN"), "L-2", "cracks");
@@ -105,7 +105,7 @@ class LotTest {
               null);
       LotDecisions decide = new LotDecisions(book);
       assertRefused(
-          "lot L-1 cannot have 1 pieces: 0 are placed or scrapped and 2 have a number",
+          "lot L-1 cannot have 1 piece: 0 are placed or scrapped and 2 have a number",
           "lodebook piece list L-1",
           () -> decide.count(TestShop.BENCH, "L-1", 1, "recounted"));
       decide.count(TestShop.BENCH, "L-1", 2, "recounted");

@@ -81,7 +81,7 @@ class PieceImportTest {
       List<ReadingRow> rows = List.of(row(1, "A1"), row(2, "A2"));
       imports.importReadings(TestShop.BENCH, "L-1", rows, null);
       LotTest.assertRefused(
-          "all 2 readings of the file are in the book already for lot L-1",
+          "all readings of the file (2) are in the book already for lot L-1",
           "lodebook piece import L-1 FILE --again --why TEXT",
           () -> imports.importReadings(TestShop.BENCH, "L-1", rows, null));
       assertProblems(

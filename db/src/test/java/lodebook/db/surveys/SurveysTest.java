@@ -265,7 +265,7 @@ class SurveysTest {
         () -> surveys.declareVoid(Act.by("BO"), "S-2", "wrong meter"));
     assertRefused(
         "say with --why for what reason survey S-2 is changed",
-        null,
+        "lodebook survey void S-2 --why TEXT",
         () -> surveys.declareVoid(BENCH, "S-2", ""));
     assertEquals("R-2", surveys.move(LEAD, "S-2", "R-2", "wrong rotor").rotor());
     assertRefused(

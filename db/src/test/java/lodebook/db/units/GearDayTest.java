@@ -114,7 +114,7 @@ class GearDayTest {
           told(batches.open(PLANNER, "B-2", "GEAR@A", 1, "R-{001}").rotors()));
       assertRefused(
           "\"R-1\" is no pattern of serials: one number in braces, such as R-{0001}",
-          null,
+          "lodebook help batch open",
           () -> batches.open(PLANNER, "B-3", "GEAR", 1, "R-1"));
       assertRefused(
           "B-2 is taken already: it is a batch",
@@ -293,7 +293,7 @@ class GearDayTest {
           () -> units.assemble(PLANNER, "U-1", "GEAR", "R-2", "R-1", null));
       assertRefused(
           "unit U-1 cannot have rotor R-1 inside and outside",
-          null,
+          "lodebook rotor list",
           () -> units.assemble(PLANNER, "U-1", "GEAR", "R-1", "r-1", null));
       assertRefused(
           "PL is planner and may not do \"unit assemble\"; it needs lead",

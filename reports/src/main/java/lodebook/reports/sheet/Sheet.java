@@ -21,8 +21,9 @@ import org.apache.pdfbox.pdmodel.common.PDRectangle;
 import org.apache.pdfbox.pdmodel.font.PDFont;
 import org.apache.pdfbox.pdmodel.font.PDType0Font;
 
-/// A sheet of one or more pages as a PDF/A-2b file: a head on every page but the first, a foot on
-/// every page, the same bytes for the same content.
+/// One sheet or several, of one or more pages each, as a PDF/A-2b file: a head on every page of a
+/// sheet but its first, a foot on every page, pages counted sheet by sheet, the same bytes for the
+/// same content.
 public final class Sheet implements AutoCloseable {
   /// Margin left and right, millimetres.
   public static final double MARGIN = 15;
@@ -34,27 +35,36 @@ public final class Sheet implements AutoCloseable {
   private static final double FOOT = 24;
   private static final Lettering SMALL = Lettering.plain(8.5).in(Palette.GRAPHITE);
 
-  private final SheetFacts facts;
+  private final List<SheetFacts> sheets;
   private final Words words;
   private final String kind;
   private final Typeface typeface;
   private final PDDocument document = new PDDocument();
   private final PDFont plain;
   private final PDFont bold;
-  private final List<PdfCanvas> pages = new ArrayList<>();
+  private final List<List<PdfCanvas>> pages = new ArrayList<>();
 
   /// An empty sheet.
   ///
   /// @param kind what it is, in the reader's language, such as "Traveller"
   public Sheet(String kind, SheetFacts facts, Typeface typeface) {
+    this(kind, List.of(facts), typeface);
+  }
+
+  /// Several empty sheets of one kind, language and paper; the first is begun.
+  ///
+  /// @param sheets what each says about itself, at least one
+  public Sheet(String kind, List<SheetFacts> sheets, Typeface typeface) {
     this.kind = kind;
-    this.facts = facts;
-    this.words = new Words(facts.language());
+    this.sheets = List.copyOf(sheets);
+    this.words = new Words(sheets.getFirst().language());
+    pages.add(new ArrayList<>());
     this.typeface = typeface;
     try {
       plain = PDType0Font.load(document, typeface.file(false), true);
       bold = PDType0Font.load(document, typeface.file(true), true);
-      ArchiveMetadata.write(document, kind + " " + facts.code(), facts);
+      String codes = String.join(", ", sheets.stream().map(SheetFacts::code).toList());
+      ArchiveMetadata.write(document, kind + " " + codes, sheets.getFirst());
     } catch (IOException broken) {
       throw new UncheckedIOException(broken);
     }
@@ -65,21 +75,31 @@ public final class Sheet implements AutoCloseable {
     return typeface;
   }
 
-  /// Begins a page; all but the first carry a head.
+  /// Ends the sheet that was begun last and begins the next one.
+  public void nextSheet() {
+    pages.add(new ArrayList<>());
+  }
+
+  private SheetFacts facts() {
+    return sheets.get(pages.size() - 1);
+  }
+
+  /// Begins a page; all but a sheet's first carry a head.
   ///
   /// @return the whole page, its origin at the paper's upper left corner
   public Canvas newPage() {
     var size =
         new PDRectangle(
-            (float) (facts.paper().widthMillimetres() * 72 / 25.4),
-            (float) (facts.paper().heightMillimetres() * 72 / 25.4));
+            (float) (facts().paper().widthMillimetres() * 72 / 25.4),
+            (float) (facts().paper().heightMillimetres() * 72 / 25.4));
     var page = new PDPage(size);
     document.addPage(page);
     try {
       var content = new PDPageContentStream(document, page);
-      var canvas = new PdfCanvas(content, typeface, plain, bold, facts.paper().heightMillimetres());
-      pages.add(canvas);
-      if (pages.size() > 1) {
+      var canvas =
+          new PdfCanvas(content, typeface, plain, bold, facts().paper().heightMillimetres());
+      pages.getLast().add(canvas);
+      if (pages.getLast().size() > 1) {
         head(canvas);
       }
       return canvas;
@@ -90,24 +110,25 @@ public final class Sheet implements AutoCloseable {
 
   /// Where content may begin on the page last begun, millimetres from the paper's upper edge.
   public double contentTop() {
-    return pages.size() > 1 ? TOP + HEAD : TOP;
+    return pages.getLast().size() > 1 ? TOP + HEAD : TOP;
   }
 
   /// Where content must end, millimetres from the paper's upper edge.
   public double contentBottom() {
-    return facts.paper().heightMillimetres() - FOOT;
+    return facts().paper().heightMillimetres() - FOOT;
   }
 
   /// Width of the content, millimetres.
   public double contentWidth() {
-    return facts.paper().widthMillimetres() - 2 * MARGIN;
+    return facts().paper().widthMillimetres() - 2 * MARGIN;
   }
 
   private double right() {
-    return facts.paper().widthMillimetres() - MARGIN;
+    return facts().paper().widthMillimetres() - MARGIN;
   }
 
   private void head(Canvas canvas) {
+    SheetFacts facts = facts();
     String copy = facts.copy() > 1 ? words.say("sheet.copy", Integer.toString(facts.copy())) : "";
     double copyWidth = copy.isEmpty() ? 0 : typeface.width(copy, Lettering.bold(11)) + 4;
     String title = kind + " " + facts.code();
@@ -122,11 +143,11 @@ public final class Sheet implements AutoCloseable {
         new java.awt.geom.Line2D.Double(MARGIN, TOP + 7, right(), TOP + 7), Palette.GRAPHITE, 0.3);
   }
 
-  private void foot(Canvas canvas, int page) {
+  private void foot(Canvas canvas, SheetFacts facts, int page, int of) {
     double top = contentBottom() + 4;
     canvas.stroke(
         new java.awt.geom.Line2D.Double(MARGIN, top, right(), top), Palette.GRAPHITE, 0.3);
-    String pageOf = words.say("sheet.page", Integer.toString(page), Integer.toString(pages.size()));
+    String pageOf = words.say("sheet.page", Integer.toString(page), Integer.toString(of));
     double pageWidth = typeface.width(pageOf, Lettering.bold(11)) + 4;
     String when = DateTimeFormatter.ofPattern("uuuu-MM-dd HH:mm xxx").format(facts.printedAt());
     String about =
@@ -142,14 +163,17 @@ public final class Sheet implements AutoCloseable {
     canvas.text(pageOf, right(), top + 4.6, Lettering.bold(11), Anchor.END);
   }
 
-  /// Ends the sheet.
+  /// Ends the sheets.
   ///
   /// @return the file's bytes
   public byte[] finish() {
     try {
       for (int i = 0; i < pages.size(); i++) {
-        foot(pages.get(i), i + 1);
-        pages.get(i).close();
+        List<PdfCanvas> sheet = pages.get(i);
+        for (int j = 0; j < sheet.size(); j++) {
+          foot(sheet.get(j), sheets.get(i), j + 1, sheet.size());
+          sheet.get(j).close();
+        }
       }
       var bytes = new ByteArrayOutputStream();
       document.save(bytes);

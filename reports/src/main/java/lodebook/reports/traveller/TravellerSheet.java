@@ -17,6 +17,7 @@ import lodebook.reports.ring.RingPicture;
 import lodebook.reports.ring.RingSizes;
 import lodebook.reports.sheet.Flow;
 import lodebook.reports.sheet.Sheet;
+import lodebook.reports.sheet.SheetFacts;
 import lodebook.reports.sheet.Table;
 import lodebook.reports.words.Words;
 
@@ -42,11 +43,23 @@ public final class TravellerSheet {
   ///
   /// @throws IllegalArgumentException if two steps name the same slot or a slot is not the layout's
   public static byte[] pdf(Traveller traveller) {
-    var words = new Words(traveller.facts().language());
+    return pdf(List.of(traveller));
+  }
+
+  /// One file of several travellers in their order, pages counted traveller by traveller.
+  ///
+  /// @param travellers at least one, in one language
+  public static byte[] pdf(List<Traveller> travellers) {
+    var words = new Words(travellers.getFirst().facts().language());
     String kind = words.say("traveller.kind");
-    try (var sheet = new Sheet(kind, traveller.facts(), new Typeface())) {
-      var writer = new TravellerSheet(traveller, words, new Flow(sheet));
-      writer.write();
+    List<SheetFacts> facts = travellers.stream().map(Traveller::facts).toList();
+    try (var sheet = new Sheet(kind, facts, new Typeface())) {
+      for (int i = 0; i < travellers.size(); i++) {
+        if (i > 0) {
+          sheet.nextSheet();
+        }
+        new TravellerSheet(travellers.get(i), words, new Flow(sheet)).write();
+      }
       return sheet.finish();
     }
   }

@@ -151,6 +151,17 @@ final class TravellerSheetTest {
     assertFalse(text(pdf).contains("copy"));
   }
 
+  @Test
+  void severalTravellersInOneFileCountTheirPagesEachAlone() throws Exception {
+    Traveller first = Samples.traveller(Samples.facts("R-0007"), layout, block);
+    Traveller second = Samples.traveller(Samples.facts("R-0003"), layout, block);
+    byte[] both = TravellerSheet.pdf(List.of(first, second));
+    assertEquals(List.of(), Archive.faults(both));
+    String one = text(pdf);
+    assertEquals(one + one.replace("R-0007", "R-0003"), text(both));
+    assertTrue(one.contains("page 1 of 2"), one);
+  }
+
   /// 300 slots: each step once, the head on every page of the table, no row alone on a page.
   @Test
   void aLongTableBreaksWell() throws IOException {

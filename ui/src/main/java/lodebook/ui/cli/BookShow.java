@@ -28,7 +28,8 @@ final class BookShow extends Verb {
               .row("generation", info.generation())
               .row("people", info.people())
               .row("pieces", info.pieces());
-      new TreeMap<>(info.things()).forEach(table::row);
+      new TreeMap<>(info.things())
+          .forEach((kind, count) -> table.row(session.words().say("things." + kind), count));
       session.say(table.text());
     }
     return 0;

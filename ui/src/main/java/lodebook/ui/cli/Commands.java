@@ -67,7 +67,7 @@ final class Commands {
   static String sentence(ParameterException wrong, Words words) {
     String unknown = unknownCommand(wrong);
     return unknown == null
-        ? String.valueOf(wrong.getMessage())
+        ? new LineWords(words).sentence(wrong)
         : words.say("line.no-command", unknown);
   }
 

@@ -15,6 +15,8 @@ import java.util.HexFormat;
 import java.util.List;
 import java.util.Locale;
 import lodebook.db.refusal.Refusal;
+import lodebook.db.refusal.RefusalKind;
+import lodebook.db.refusal.RowsRefused;
 import lodebook.ui.craft.PiecesShort;
 import lodebook.ui.files.BadFile;
 import lodebook.ui.files.Problem;
@@ -39,12 +41,18 @@ final class Failures {
   int handle(Throwable failure) {
     PrintStream err = session.around().err();
     return switch (failure) {
-      case BadFile bad -> file(bad.problems(), bad.more(), null, WRONG_INPUT);
+      case BadFile bad -> file(bad.problems(), bad.more(), example(), WRONG_INPUT);
       case FileRefused refused ->
           file(refused.problems(), refused.more(), refused.remedy(), refused.exitCode());
+      case RowsRefused rows -> {
+        rows.problems()
+            .forEach(p -> err.println("lodebook: " + session.sentences().say(p.refusal())));
+        sayRemedy(err, rows.problems().getFirst().refusal().remedy());
+        yield rows.kind().exitCode();
+      }
       case Refusal refusal -> {
         err.println("lodebook: " + session.sentences().say(refusal));
-        sayRemedy(err, refusal.remedy());
+        sayRemedy(err, refusal.remedy() == null ? usual(refusal.kind()) : refusal.remedy());
         yield refusal.kind().exitCode();
       }
       case PiecesShort pieces -> {
@@ -83,6 +91,17 @@ final class Failures {
     err.println(session.words().say("file.nothing-changed"));
     sayRemedy(err, remedy);
     return exitCode;
+  }
+
+  private String example() {
+    return "lodebook " + session.doing() + " --example FILE";
+  }
+
+  /// The command that helps where the refusal names none.
+  private String usual(RefusalKind kind) {
+    return kind == RefusalKind.CANNOT_OPEN
+        ? "lodebook book info"
+        : "lodebook help " + session.doing();
   }
 
   private void sayRemedy(PrintStream err, @Nullable String remedy) {

@@ -4,8 +4,8 @@ import java.util.List;
 import lodebook.db.refusal.RowProblem;
 import lodebook.db.refusal.RowsRefused;
 import lodebook.ui.files.BadFile;
+import lodebook.ui.files.Placed;
 import lodebook.ui.files.Problem;
-import lodebook.ui.files.Rows;
 import org.jspecify.annotations.Nullable;
 
 /// The book refuses rows of a file: the same list of places as for a file that is wrong in itself.
@@ -26,18 +26,18 @@ final class FileRefused extends RuntimeException {
     this.exitCode = cause.kind().exitCode();
   }
 
-  /// The refusal with the places of its rows.
-  static FileRefused of(RowsRefused refused, Rows<?> rows, Session session) {
+  /// The refusal with the places of its rows or keys.
+  static FileRefused of(RowsRefused refused, Placed read, Session session) {
     List<RowProblem> all = refused.problems();
     List<String> remedies =
         all.stream().map(p -> String.valueOf(p.refusal().remedy())).distinct().toList();
     String common = remedies.size() == 1 ? all.getFirst().refusal().remedy() : null;
-    List<Rows.RowFault> faults =
+    List<Placed.Fault> faults =
         all.stream()
             .limit(BadFile.SHOWN)
-            .map(p -> new Rows.RowFault(p.row(), p.column(), sentence(p, common, session)))
+            .map(p -> new Placed.Fault(p.row(), p.column(), sentence(p, common, session)))
             .toList();
-    return new FileRefused(rows.problems(faults), all.size() - faults.size(), common, refused);
+    return new FileRefused(read.problems(faults), all.size() - faults.size(), common, refused);
   }
 
   private static String sentence(RowProblem problem, @Nullable String common, Session session) {

@@ -3,7 +3,7 @@ package lodebook.ui.cli;
 import java.nio.file.Path;
 import lodebook.db.refusal.RowsRefused;
 import lodebook.ui.files.Example;
-import lodebook.ui.files.Rows;
+import lodebook.ui.files.Placed;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Option;
 
@@ -43,12 +43,12 @@ abstract class FileVerb extends Verb {
     return given;
   }
 
-  /// Does something with the rows of a file; what the book refuses is told at its place.
-  void importing(Rows<?> rows, Runnable work) {
+  /// Does something with what a file holds; what the book refuses is told at its place.
+  void importing(Placed read, Runnable work) {
     try {
       work.run();
     } catch (RowsRefused refused) {
-      throw FileRefused.of(refused, rows, session);
+      throw FileRefused.of(refused, read, session);
     }
   }
 }

@@ -2,8 +2,8 @@ package lodebook.ui.cli;
 
 import java.nio.file.Path;
 import lodebook.db.layouts.GearDraft;
-import lodebook.db.layouts.GearRevision;
 import lodebook.db.layouts.Gears;
+import lodebook.ui.files.Documents;
 import lodebook.ui.files.Example;
 import lodebook.ui.files.GearFile;
 import org.jspecify.annotations.Nullable;
@@ -25,10 +25,12 @@ final class GearTakeIn extends FileVerb {
 
   @Override
   int takeIn() {
-    GearDraft draft = GearFile.read(session.source(need(file, "FILE")));
-    GearRevision gear = session.write(book -> new Gears(book).importDraft(session.act(), draft));
-    session.done("gear.imported", gear.model().spoken());
-    session.next("lodebook gear release " + gear.model().code());
+    Documents<GearDraft> read = GearFile.read(session.source(need(file, "FILE")));
+    GearDraft draft = read.all().getFirst();
+    importing(
+        read, () -> session.change(book -> new Gears(book).importDraft(session.act(), draft)));
+    session.done("gear.imported", draft.code() + " rev " + draft.revision());
+    session.next("lodebook gear release " + draft.code());
     return 0;
   }
 }

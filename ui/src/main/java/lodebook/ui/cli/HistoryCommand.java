@@ -44,11 +44,11 @@ final class HistoryCommand extends Verb {
     return 0;
   }
 
-  private static String with(HistoryEntry line) {
+  private String with(HistoryEntry line) {
     List<String> said = new ArrayList<>();
     line.fields().forEach(f -> said.add(f.name() + " " + f.content()));
     if (line.rows() > 0) {
-      said.add(line.rows() + " rows");
+      said.add(session.words().say("history.rows", line.rows()));
     }
     if (said.size() > MOST_FIELDS) {
       return String.join(", ", said.subList(0, MOST_FIELDS)) + ", ...";

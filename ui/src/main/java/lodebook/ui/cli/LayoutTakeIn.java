@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.List;
 import lodebook.assembly.layout.Layout;
 import lodebook.db.layouts.Layouts;
+import lodebook.ui.files.Documents;
 import lodebook.ui.files.Example;
 import lodebook.ui.files.LayoutFile;
 import org.jspecify.annotations.Nullable;
@@ -25,10 +26,12 @@ final class LayoutTakeIn extends FileVerb {
 
   @Override
   int takeIn() {
-    List<Layout> layouts = LayoutFile.read(session.source(need(file, "FILE")));
-    session.change(book -> new Layouts(book).importDrafts(session.act(), layouts));
+    Documents<Layout> read = LayoutFile.read(session.source(need(file, "FILE")));
+    List<Layout> layouts = read.all();
+    importing(
+        read, () -> session.change(book -> new Layouts(book).importDrafts(session.act(), layouts)));
     List<String> names = layouts.stream().map(LayoutShow::shown).toList();
-    session.done("layout.imported", String.join(", ", names));
+    session.done("layout.imported", String.join(", ", names), names.size());
     session.next("lodebook layout release " + layouts.getFirst().code());
     return 0;
   }

@@ -1,20 +1,24 @@
 package lodebook.ui.cli;
 
 import java.nio.file.Path;
+import java.util.List;
 import lodebook.reports.traveller.TravellerSheet;
 import lodebook.ui.paper.Travellers;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
-/// Prints the traveller of a rotor.
+/// Prints the travellers of rotors.
 @Command(
     name = "traveller",
-    description = "Print the traveller of a rotor: what goes where, which way, what to expect.",
-    footer = {"", "Example:", "  lodebook paper traveller R-0001 -o R-0001.pdf"})
+    description = "Print travellers of rotors: what goes where, which way, what to expect.",
+    footer = {"", "Example:", "  lodebook paper traveller R-0001 R-0002 -o travellers.pdf"})
 final class PaperTraveller extends Verb {
-  @Parameters(paramLabel = "ROTOR", description = "its number")
-  private String rotor = "";
+  @Parameters(
+      arity = "1..*",
+      paramLabel = "ROTOR",
+      description = "their numbers, in the order of the pages")
+  private List<String> rotors = List.of();
 
   @Option(
       names = {"-o", "--output"},
@@ -29,11 +33,16 @@ final class PaperTraveller extends Verb {
 
   @Override
   int run() {
-    Travellers.Material material =
-        session.read(book -> Travellers.read(book, rotor, session.facts(book)));
-    OutputFile.write(file, TravellerSheet.pdf(Travellers.of(material)));
-    session.done("traveller.written", rotor, file);
-    session.next("lodebook place " + rotor + " placements.csv");
+    List<Travellers.Material> materials =
+        session.read(
+            book ->
+                rotors.stream()
+                    .map(rotor -> Travellers.read(book, rotor, session.facts(book)))
+                    .toList());
+    OutputFile.write(file, TravellerSheet.pdf(materials.stream().map(Travellers::of).toList()));
+    List<String> shown = materials.stream().map(m -> m.shown().rotor().code()).toList();
+    session.done("traveller.written", String.join(", ", shown), file, shown.size());
+    session.next("lodebook place " + shown.getFirst() + " placements.csv");
     return 0;
   }
 }

@@ -2,6 +2,9 @@ package lodebook.ui.cli;
 
 import java.nio.file.Path;
 import lodebook.db.stock.ImportedReadings;
+import lodebook.db.stock.Lot;
+import lodebook.db.stock.LotState;
+import lodebook.db.stock.Lots;
 import lodebook.db.stock.PieceImport;
 import lodebook.db.stock.ReadingRow;
 import lodebook.ui.files.Example;
@@ -40,18 +43,25 @@ final class PieceTakeIn extends FileVerb {
   int takeIn() {
     String of = need(lot, "LOT");
     Path path = need(file, "FILE");
-    String reason = again ? need(why, "--why") : null;
+    String reason = again ? need(why, "--why TEXT") : null;
     Rows<ReadingRow> rows = PieceReadingFile.read(session.source(path), of, again);
     importing(
         rows,
         () ->
             session.change(
-                book ->
-                    tell(
-                        new PieceImport(book)
-                            .importReadings(session.act(), of, rows.all(), reason))));
-    session.next("lodebook lot accept " + of + " --why TEXT");
+                book -> {
+                  tell(new PieceImport(book).importReadings(session.act(), of, rows.all(), reason));
+                  next(new Lots(book).show(of));
+                }));
     return 0;
+  }
+
+  private void next(Lot lot) {
+    String code = lot.code();
+    session.next(
+        lot.state() == LotState.AWAITING
+            ? "lodebook lot accept " + code + " --why TEXT"
+            : "lodebook lot show " + code);
   }
 
   private void tell(ImportedReadings taken) {

@@ -48,7 +48,7 @@ final class PlaceCommand extends FileVerb {
     if (correct && rework) {
       throw wrongLine("line.not-both", "--correct", "--rework");
     }
-    String reason = correct || rework || deviation ? need(why, "--why") : "";
+    String reason = correct || rework || deviation ? need(why, "--why TEXT") : "";
     PlaceHow.Change change =
         correct ? PlaceHow.Change.CORRECT : rework ? PlaceHow.Change.REWORK : PlaceHow.Change.NONE;
     Rows<PlaceRow> rows = PlacementFile.read(session.source(path));

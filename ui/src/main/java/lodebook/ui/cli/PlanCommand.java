@@ -67,15 +67,16 @@ final class PlanCommand extends Verb {
     List<String> wanted = wanted();
     if (drop) {
       session.change(book -> new Plans(book).drop(session.act(), wanted));
-      session.done("plan.dropped", String.join(", ", wanted));
+      session.done("plan.dropped", String.join(", ", wanted), wanted.size());
       session.next("lodebook plan " + String.join(" ", wanted) + " --from LOT");
       return 0;
     }
     if (lots.isEmpty()) {
-      throw wrongLine("line.missing", "--from");
+      throw wrongLine("line.missing", "--from LOT");
     }
     if (seconds != null && !(seconds > 0)) {
-      throw wrongLine("line.not-one-of", "--seconds", seconds, "a number above 0");
+      throw wrongLine(
+          "line.not-read", "--seconds", seconds, session.words().say("line.above-zero"));
     }
     return plan(wanted);
   }

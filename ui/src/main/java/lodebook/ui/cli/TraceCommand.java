@@ -49,17 +49,36 @@ final class TraceCommand extends Verb {
     }
   }
 
+  /// Nodes side by side that share their branches are followed by these, said once.
   private void lines(StringBuilder text, List<TraceNode> nodes, String indent) {
-    for (TraceNode node : nodes) {
-      text.append(indent).append(node.code()).append(" (").append(node.kind());
-      text.append(node.state().isEmpty() ? "" : ", " + node.state()).append(')');
-      if (node.from() != null) {
-        text.append(' ').append(Amounts.minute(node.from(), session.zone()));
-        text.append(node.to() == null ? "" : " to " + Amounts.minute(node.to(), session.zone()));
+    int alike = 0;
+    for (int i = 0; i < nodes.size(); i++) {
+      TraceNode node = nodes.get(i);
+      text.append(indent).append(line(node)).append('\n');
+      alike++;
+      if (i + 1 < nodes.size() && nodes.get(i + 1).branches().equals(node.branches())) {
+        continue;
       }
-      text.append('\n');
+      if (alike > 1 && !node.branches().isEmpty()) {
+        text.append(indent).append(session.words().say("trace.each", alike)).append('\n');
+      }
       lines(text, node.branches(), indent + "  ");
+      alike = 0;
     }
+  }
+
+  private String line(TraceNode node) {
+    StringBuilder line = new StringBuilder(node.code());
+    line.append(" (").append(node.kind());
+    line.append(node.state().isEmpty() ? "" : ", " + node.state()).append(')');
+    if (node.magnets() != null) {
+      line.append(", ").append(session.words().say("trace.magnets", node.magnets()));
+    }
+    if (node.from() != null) {
+      line.append(' ').append(Amounts.minute(node.from(), session.zone()));
+      line.append(node.to() == null ? "" : " to " + Amounts.minute(node.to(), session.zone()));
+    }
+    return line.toString();
   }
 
   private static Json json(Trace trace) {
@@ -90,6 +109,6 @@ final class TraceCommand extends Verb {
     if (node.from() != null) {
       json.put("from", node.from()).put("to", node.to());
     }
-    return json.put(key, nodes(node.branches(), key));
+    return json.putIfAny("count", node.magnets()).put(key, nodes(node.branches(), key));
   }
 }

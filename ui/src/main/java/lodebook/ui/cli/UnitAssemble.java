@@ -48,7 +48,7 @@ final class UnitAssemble extends Verb {
   @Override
   int run() {
     if (override && why == null) {
-      throw wrongLine("line.missing", "--why");
+      throw wrongLine("line.missing", "--why TEXT");
     }
     String reason = override ? why : null;
     judgeLatest(inner);

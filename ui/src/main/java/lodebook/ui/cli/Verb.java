@@ -3,6 +3,7 @@ package lodebook.ui.cli;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 
@@ -24,7 +25,21 @@ abstract class Verb implements Callable<Integer> {
   @Override
   public final Integer call() {
     session.doing(spec().qualifiedName().replaceFirst("^lodebook ", ""));
+    refuseBlankReason();
     return run();
+  }
+
+  private void refuseBlankReason() {
+    for (OptionSpec option : spec().options()) {
+      boolean reason = option.paramLabel().equals("TEXT");
+      if (reason && option.getValue() instanceof String text && given(option) && text.isBlank()) {
+        throw wrongLine("line.blank", option.longestName());
+      }
+    }
+  }
+
+  private boolean given(OptionSpec option) {
+    return spec().commandLine().getParseResult().hasMatchedOption(option);
   }
 
   private CommandSpec spec() {

@@ -30,14 +30,14 @@ public final class GearFile {
   /// The gear model of a file. Whether its pieces fit its layouts' pole pairs, only the book knows.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static GearDraft read(Source source) {
+  public static Documents<GearDraft> read(Source source) {
     JsonProblems problems = new JsonProblems(source);
     JsonFields file =
         JsonFields.of(
             problems, JsonText.read(source, problems), source.words().say("json.the-file"), KEYS);
     GearDraft gear = gear(file);
     problems.throwIfAny();
-    return gear;
+    return new Documents<>(source, List.of(gear), List.of(file));
   }
 
   private static GearDraft gear(JsonFields file) {

@@ -51,6 +51,11 @@ final class JsonFields {
     }
   }
 
+  /// The object itself.
+  JsonValue.Fields fields() {
+    return fields;
+  }
+
   /// Whether the key is there and not null.
   boolean has(String key) {
     JsonValue.Field field = fields.byName().get(key);
@@ -64,10 +69,10 @@ final class JsonFields {
     problems.note(place, sentenceKey, arguments);
   }
 
-  private @Nullable JsonValue value(String key, String expectedKey) {
+  private @Nullable JsonValue value(String key, String expectedKey, Object... arguments) {
     JsonValue.Field field = fields.byName().get(key);
     if (field == null) {
-      problems.note(fields.place(), "json.missing", key, problems.say(expectedKey));
+      problems.note(fields.place(), "json.missing", key, problems.say(expectedKey, arguments));
       return null;
     }
     return field.content();
@@ -136,7 +141,8 @@ final class JsonFields {
 
   /// One of some words that must be there.
   <T> T oneOf(String key, Map<String, T> meanings, T otherwise) {
-    JsonValue value = value(key, "json.word");
+    String words = String.join(", ", meanings.keySet());
+    JsonValue value = value(key, "json.one-of", words);
     return value == null ? otherwise : meaning(key, value, meanings, otherwise);
   }
 

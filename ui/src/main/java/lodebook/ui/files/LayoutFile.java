@@ -1,7 +1,9 @@
 package lodebook.ui.files;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 import java.util.TreeMap;
@@ -62,16 +64,25 @@ public final class LayoutFile {
   /// The layouts of a file: the one it states, and those that its key `also` lists.
   ///
   /// @throws BadFile where the file is wrong in itself
-  public static List<Layout> read(Source source) {
+  public static Documents<Layout> read(Source source) {
     JsonProblems problems = new JsonProblems(source);
     JsonFields file =
         JsonFields.of(
             problems, JsonText.read(source, problems), source.words().say("json.the-file"), KEYS);
-    List<Layout> layouts = new ArrayList<>();
-    layouts.add(layout(file));
-    file.objects("also", KEYS).forEach(also -> layouts.add(layout(also)));
+    List<JsonFields> objects = new ArrayList<>(List.of(file));
+    objects.addAll(file.objects("also", KEYS));
+    Set<String> names = new HashSet<>();
+    List<Layout> layouts = objects.stream().map(object -> once(object, names)).toList();
     problems.throwIfAny();
-    return List.copyOf(layouts);
+    return new Documents<>(source, layouts, objects);
+  }
+
+  private static Layout once(JsonFields file, Set<String> names) {
+    Layout layout = layout(file);
+    if (!names.add(layout.name().toLowerCase(Locale.ROOT))) {
+      file.problem("revision", "layout.twice", layout.name());
+    }
+    return layout;
   }
 
   private static Layout layout(JsonFields file) {

@@ -59,7 +59,7 @@ public final class PieceReadingFile {
           cells,
           "piece",
           piece + "|" + value + "|" + unit + "|" + standoff + "|" + rest(cells),
-          cells.raw("piece"));
+          "piece " + cells.raw("piece"));
     }
     return new ReadingRow(
         piece,

@@ -7,6 +7,10 @@ package lodebook.ui.files;
 /// @param column column in characters, from 1
 /// @param sentence what is wrong and what was expected
 public record Problem(String file, int line, int column, String sentence) {
+  Problem(String file, Place place, String sentence) {
+    this(file, place.line(), place.column(), sentence);
+  }
+
   /// The problem as `file:line:column: sentence`.
   @Override
   public String toString() {

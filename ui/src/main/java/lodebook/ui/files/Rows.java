@@ -8,7 +8,7 @@ import java.util.Set;
 /// All rows of a file that is right in itself.
 ///
 /// @param <T> what a row is
-public final class Rows<T> {
+public final class Rows<T> implements Placed {
   private final Source source;
   private final CsvHeader header;
   private final List<T> all;
@@ -31,23 +31,16 @@ public final class Rows<T> {
     return all.size();
   }
 
-  /// Problems that only the book knew of, at their places in the file.
-  public List<Problem> problems(List<RowFault> faults) {
+  @Override
+  public List<Problem> problems(List<Fault> faults) {
     Set<Integer> wanted = new HashSet<>();
     faults.forEach(f -> wanted.add(lines[f.row()]));
     FieldPlaces places = FieldPlaces.scan(source, header.separator(), wanted);
     return faults.stream().map(f -> problem(f, places)).toList();
   }
 
-  private Problem problem(RowFault fault, FieldPlaces places) {
+  private Problem problem(Fault fault, FieldPlaces places) {
     Place place = places.of(lines[fault.row()], header.indexOf(fault.column()));
-    return new Problem(source.path().toString(), place.line(), place.column(), fault.sentence());
+    return new Problem(source.path().toString(), place, fault.sentence());
   }
-
-  /// What the book says against a row.
-  ///
-  /// @param row index of the row, from 0
-  /// @param column name of the column at fault
-  /// @param sentence what is wrong
-  public record RowFault(int row, String column, String sentence) {}
 }

@@ -24,19 +24,25 @@ public final class SurveyFile {
   static final Map<String, Component> COMPONENTS =
       new TreeMap<>(Map.of("radial", Component.RADIAL, "tangential", Component.TANGENTIAL));
 
-  private SurveyFile() {}
+  private final boolean meterNamed;
+  private boolean told;
+
+  private SurveyFile(boolean meterNamed) {
+    this.meterNamed = meterNamed;
+  }
 
   /// All readings of a file.
   ///
   /// @param meterNamed whether a meter is named beside the file, so that rows need none
   /// @throws BadFile where the file is wrong in itself
   public static Rows<SurveyRow> read(Source source, boolean meterNamed) {
-    return CsvTable.read(source, COLUMNS, cells -> row(cells, meterNamed));
+    return CsvTable.read(source, COLUMNS, new SurveyFile(meterNamed)::row);
   }
 
-  private static SurveyRow row(Cells cells, boolean meterNamed) {
-    if (!meterNamed && !cells.has("meter")) {
+  private SurveyRow row(Cells cells) {
+    if (!meterNamed && !told && !cells.has("meter")) {
       cells.problem("meter", "survey.no-meter");
+      told = true;
     }
     return new SurveyRow(
         cells.count("slot"),

@@ -1,27 +1,21 @@
 package lodebook.ui.words;
 
-import java.text.MessageFormat;
 import java.util.Arrays;
 import java.util.Locale;
-import java.util.ResourceBundle;
+import lodebook.db.refusal.Phrases;
 
 /// The sentences of the program in one language, from the bundle `lodebook.ui.messages`.
 ///
-/// Arguments go in as text: a number is written as `String.valueOf` has it, with a point and
-/// without groups, whatever the language.
+/// Arguments go in as text, as `String.valueOf` has it; see [Phrases] for plural forms.
 public final class Words {
   private static final String BUNDLE = "lodebook.ui.messages";
 
-  private final ResourceBundle bundle;
+  private final Phrases phrases;
   private final Locale locale;
 
   private Words(Locale locale) {
     this.locale = locale;
-    this.bundle =
-        ResourceBundle.getBundle(
-            BUNDLE,
-            locale,
-            ResourceBundle.Control.getNoFallbackControl(ResourceBundle.Control.FORMAT_PROPERTIES));
+    this.phrases = new Phrases(BUNDLE, locale);
   }
 
   /// The sentences of a language; English where there is no translation.
@@ -39,8 +33,7 @@ public final class Words {
   /// @param key key in the bundle
   /// @param arguments what fills its places
   public String say(String key, Object... arguments) {
-    Object[] texts = Arrays.stream(arguments).map(String::valueOf).toArray();
-    return new MessageFormat(bundle.getString(key), locale).format(texts);
+    return phrases.say(key, Arrays.stream(arguments).map(String::valueOf).toList());
   }
 
   /// The language.

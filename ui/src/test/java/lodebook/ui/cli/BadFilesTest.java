@@ -21,6 +21,7 @@ class BadFilesTest {
           List.of("piece", "import", "L-2404"),
           List.of("tray", "move"),
           List.of("layout", "import"),
+          List.of("gear", "import"),
           List.of("place", "R-0001"),
           List.of("survey", "import", "R-0001", "--meter", "GM-1"));
 
@@ -49,7 +50,12 @@ class BadFilesTest {
   }
 
   private void refused(List<String> command, String file, String expected) {
-    assertEquals(new Shop.Said(3, "", expected + "\nnothing was changed\n"), takeIn(command, file));
+    String noun = command.getFirst();
+    String verb = noun.equals("place") ? noun : noun + " " + command.get(1);
+    assertEquals(
+        new Shop.Said(
+            3, "", expected + "\nnothing was changed\ntry: lodebook " + verb + " --example FILE\n"),
+        takeIn(command, file));
   }
 
   @Test
@@ -63,16 +69,15 @@ class BadFilesTest {
           command,
           zip,
           "zip.csv:1:1: this is a packed file (zip or a spreadsheet), expected plain text: unpack"
-              + " it, or save the sheet as CSV in UTF-8");
+              + " it, or save it as text in UTF-8");
       refused(
           command,
           wide,
-          "wide.csv:1:1: the file is written in UTF-16, expected UTF-8: save it again as CSV in"
-              + " UTF-8");
+          "wide.csv:1:1: the file is written in UTF-16, expected UTF-8: save it again in UTF-8");
       refused(
           command,
           empty,
-          "empty.csv:1:1: the file is empty, expected at least a header row or a value");
+          "empty.csv:1:1: the file is empty, expected a header row or a JSON value");
     }
     assertEquals(before, shop.state());
   }

@@ -77,14 +77,11 @@ class CommandLineTest {
         "lot",
         "shwo");
     wrong(
-        "lodebook: Unknown option: '--jsn'\ndid you mean: --json\ntry: lodebook help lot list\n",
+        "lodebook: there is no option --jsn\ndid you mean: --json\ntry: lodebook help lot list\n",
         "lot",
         "list",
         "--jsn");
-    wrong(
-        "lodebook: Missing required parameter: 'FILE'\ntry: lodebook help lot import\n",
-        "lot",
-        "import");
+    wrong("lodebook: FILE is missing\ntry: lodebook help lot import\n", "lot", "import");
     wrong(
         """
         lodebook: --role is boss, expected one of bench, inspector, planner, lead

@@ -34,17 +34,17 @@ class FirstDayTest {
         "1",
         "--calibration-due",
         "2027-06-30");
-    takeIn(shop, "grades taken in: 1\n", "grades.csv", "grade", "import");
-    takeIn(shop, "magnet types taken in: 2\n", "types.csv", "type", "import");
-    takeIn(shop, "lots received, awaiting inspection: 2\n", "lots.csv", "lot", "import");
+    takeIn(shop, "1 grade taken in\n", "grades.csv", "grade", "import");
+    takeIn(shop, "2 magnet types taken in\n", "types.csv", "type", "import");
+    takeIn(shop, "2 lots received, awaiting inspection\n", "lots.csv", "lot", "import");
     takeIn(
         shop,
-        "readings taken in: 26, of 26 pieces (26 new)\n",
+        "26 readings of 26 pieces taken in, 26 of them new\n",
         "r.csv",
         "piece",
         "import",
         "L-2404");
-    takeIn(shop, "pieces laid into their new cells: 2\n", "moves.csv", "tray", "move");
+    takeIn(shop, "2 pieces lie in their new cells\n", "moves.csv", "tray", "move");
     said(
         shop,
         "lot L-2404 is accepted: its pieces can be planned and placed\n",
@@ -54,7 +54,7 @@ class FirstDayTest {
         "--why",
         "fine");
     takeIn(
-        shop, "STIR-IN rev A, STIR-OUT rev A taken in as a draft\n", "l.json", "layout", "import");
+        shop, "STIR-IN rev A, STIR-OUT rev A taken in as drafts\n", "l.json", "layout", "import");
     said(
         shop,
         "STIR-IN rev A is released and never changes from now on\n",
@@ -70,7 +70,7 @@ class FirstDayTest {
         "--serial",
         "R-0001");
     takeIn(shop, "STIR rev A taken in as a draft\n", "g.json", "gear", "import");
-    takeIn(shop, "rotor R-0001: slots recorded 12, filled 12 of 12\n", "p.csv", "place", "R-0001");
+    takeIn(shop, "rotor R-0001: 12 slots recorded, 12 of 12 filled\n", "p.csv", "place", "R-0001");
     takeIn(shop, "S-1\n", "s.csv", "survey", "import", "R-0001", "--meter", "GM-1");
     said(shop, "S-1: rotor R-0001 PASSES; every magnet is shown right\n", "survey", "check", "S-1");
   }

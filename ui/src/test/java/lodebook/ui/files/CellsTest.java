@@ -45,7 +45,7 @@ class CellsTest {
     check(
         "piece",
         "1,C,1,325.9,mT,1,20\nL-2404/0001,C,1,325.90,mT,1.0,20\n2,c,1,320,mT,1,20\n1,D,1,325,mT,1,20\n",
-        "a.csv:3:1: L-2404/0001 stands here again after line 2, expected it once",
+        "a.csv:3:1: piece L-2404/0001 stands here again after line 2, expected it once",
         "a.csv:4:5: tray c cell 1 already holds piece 1 in this file, expected one piece in a cell",
         "a.csv:5:5: piece 1 stands in tray and cell C 1 and in D 1, expected one place");
     check(
@@ -135,7 +135,7 @@ class CellsTest {
     Source file = bench.file("a.csv", "slot,spot,component,value,unit\n1,centre,radial,1,mT\n");
     assertEquals(
         List.of(
-            "a.csv:2:1: no meter is named, expected a column meter with a value in this row, or"
+            "a.csv:2:1: no meter is named, expected a column meter with a value in every row, or"
                 + " --meter METER"),
         bench.problems(file, source -> SurveyFile.read(source, false)));
   }

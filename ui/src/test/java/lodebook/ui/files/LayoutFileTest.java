@@ -80,8 +80,8 @@ class LayoutFileTest {
             false,
             InsertFrom.FACE,
             0.03);
-    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", LAYOUT)));
-    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", "\uFEFF" + LAYOUT)));
+    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", LAYOUT)).all());
+    assertEquals(List.of(expected), LayoutFile.read(bench.file("l.json", "\uFEFF" + LAYOUT)).all());
   }
 
   @Test
@@ -158,7 +158,7 @@ class LayoutFileTest {
         List.of("l.json:1:1: the file is a list, expected an object in braces"),
         bench.problems(bench.file("l.json", "[]"), LayoutFile::read));
     assertEquals(
-        List.of("l.json:1:1: the file is empty, expected at least a header row or a value"),
+        List.of("l.json:1:1: the file is empty, expected a header row or a JSON value"),
         bench.problems(bench.file("l.json", " \n"), LayoutFile::read));
   }
 
@@ -167,7 +167,7 @@ class LayoutFileTest {
     assertEquals(
         new GearDraft(
             "STIR", "A", "STIR-IN@A", "STIR-OUT@A", 11, Member.OUTER, null, null, 0.01, null),
-        GearFile.read(bench.file("g.json", GEAR)));
+        GearFile.read(bench.file("g.json", GEAR)).all().getFirst());
     String wrong =
         GEAR.replace("STIR-IN@A", "STIR-IN").replace("\"held\": \"outer\"", "\"held\": \"ring\"");
     assertEquals(

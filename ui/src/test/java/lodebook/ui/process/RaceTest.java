@@ -56,7 +56,7 @@ class RaceTest {
           i == winner
               ? new Said(
                   0,
-                  "rotor " + rotor + ": slots recorded 1, filled 1 of 12\n",
+                  "rotor " + rotor + ": 1 slot recorded, 1 of 12 filled\n",
                   "next: lodebook survey import " + rotor + " survey.csv --meter METER\n")
               : new Said(
                   4,
