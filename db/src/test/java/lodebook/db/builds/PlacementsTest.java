@@ -178,13 +178,13 @@ class PlacementsTest {
     assertRefused(
         "say with --why for what reason the record of rotor R-1 is changed, or differs from its"
             + " layout",
-        null,
+        "lodebook help place",
         () ->
             placements.place(
                 LEAD, "R-1", List.of(row(1, "L-1")), new PlaceHow(Change.NONE, true, " ")));
     PlaceHow deviation = new PlaceHow(Change.NONE, true, "the customer wants it so");
     assertRefused(
-        "BE is bench and may not do \"place\"; it needs lead",
+        "BE is bench and may not do \"place --deviation\"; it needs lead",
         "lodebook person list",
         () -> placements.place(BENCH, "R-1", List.of(new PlaceRow(1, "L-1", 180)), deviation));
     placements.place(LEAD, "R-1", List.of(new PlaceRow(1, "L-1", 180)), deviation);

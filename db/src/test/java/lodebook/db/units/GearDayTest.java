@@ -296,7 +296,7 @@ class GearDayTest {
           "lodebook rotor list",
           () -> units.assemble(PLANNER, "U-1", "GEAR", "R-1", "r-1", null));
       assertRefused(
-          "PL is planner and may not do \"unit assemble\"; it needs lead",
+          "PL is planner and may not do \"unit assemble --override\"; it needs lead",
           "lodebook person list",
           () -> units.assemble(PLANNER, "U-1", "GEAR", "R-1", "R-2", "trust me"));
       GearUnit unit = units.assemble(PLANNER, "U-1", "GEAR", "R-1", "R-2", null);

@@ -93,7 +93,7 @@ class DesignsByCommandTest {
     layout(
         3,
         """
-        d.json:16:28: layout X-2 rev A: slots 1 and 2 overlap by 2.39 mm at radius 3.00 mm; raise slotRadiusMillimetres to at least 9.47
+        d.json:15:28: layout X-2 rev A: slots 1 and 2 overlap by 2.39 mm at radius 3.00 mm; raise slotRadiusMillimetres to at least 9.47
         """,
         "",
         "\"bodyTurns\": false\n",
@@ -154,13 +154,13 @@ class DesignsByCommandTest {
     gear(4, "d.json:2:45: there is no layout NO\n", "layout list", "STIR-IN@A", "NO@A");
     gear(
         4,
-        "d.json:2:68: layout STIR-OUT has no revision B; it has A\n",
+        "d.json:2:67: layout STIR-OUT has no revision B; it has A\n",
         "layout list",
         "STIR-OUT@A",
         "STIR-OUT@B");
     gear(
         3,
-        "d.json:2:46: inner is \"STIR-IN\", expected a layout with its revision, CODE@REVISION\n",
+        "d.json:2:45: inner is \"STIR-IN\", expected a layout with its revision, CODE@REVISION\n",
         "gear import --example FILE",
         "STIR-IN@A",
         "STIR-IN");

@@ -44,7 +44,6 @@ class RightsTest {
         List.of(
             right(ALL, "place", "place", "R-#", place),
             right(ALL, "survey import", "survey", "import", "R-#", survey, "--meter", "GM-1"),
-            right(ALL, "survey check", "survey", "check", "R-#"),
             right(ALL, "tray move", "tray", "move", moves),
             right(ALL, "lot hold", "lot", "hold", "L-2407", "--why=x"),
             right(ALL, "piece hold", "piece", "hold", "L-2404/20", "--why=x"),
@@ -143,7 +142,7 @@ class RightsTest {
     shop.does("person", "add", "TB", "--name", "T");
     shop.does("person", "add", "PL", "--name", "P", "--role", "planner");
     shop.does("rotor", "open", "STIR-IN", "--serial", "R-1");
-    String[] plan = Day.words("plan R-1 --from L-2404 --by TB --quiet");
+    String[] plan = Day.words("plan R-1 --from L-2404 --seconds 0.1 --by TB --quiet");
     assertEquals(
         """
         lodebook: TB is bench and may not do "plan"; it needs planner or lead
