@@ -24,12 +24,15 @@ final class LineWords {
     ArgSpec arg = wrong.getArgSpec();
     return switch (wrong) {
       case MissingParameterException missing when !missing.getMissing().isEmpty() ->
-          words.say("line.missing", labels(missing.getMissing()));
+          words.say(
+              missing.getMissing().size() == 1 ? "line.missing" : "line.missing-several",
+              labels(missing.getMissing()));
       case UnmatchedArgumentException unmatched ->
           words.say(
               unmatched.isUnknownOption() ? "line.no-option" : "line.one-too-many",
               unmatched.getUnmatched().getFirst());
-      case OverwrittenOptionException _ when arg != null -> words.say("line.twice", name(arg));
+      case OverwrittenOptionException twice ->
+          words.say("line.twice", name(twice.getOverwritten()));
       default -> notRead(wrong, arg);
     };
   }

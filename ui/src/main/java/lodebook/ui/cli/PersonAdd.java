@@ -16,7 +16,7 @@ final class PersonAdd extends Verb {
   @Parameters(paramLabel = "INITIALS", description = "how the person signs")
   private String initials = "";
 
-  @Option(names = "--name", required = true, description = "the person's name")
+  @Option(names = "--name", paramLabel = "NAME", required = true, description = "the person's name")
   private String name = "";
 
   @Option(names = "--role", description = "bench (default), inspector, planner or lead")

@@ -10,6 +10,7 @@ import lodebook.db.builds.Batches;
 import lodebook.db.builds.Plan;
 import lodebook.db.builds.Plans;
 import lodebook.db.builds.Rotor;
+import lodebook.db.refusal.Refusal;
 import lodebook.ui.craft.PlanWish;
 import lodebook.ui.craft.PlannedRing;
 import lodebook.ui.craft.Planning;
@@ -86,10 +87,17 @@ final class PlanCommand extends Verb {
     if (of == null) {
       return rotors;
     }
-    return session.read(book -> new Batches(book).show(of)).rotors().stream()
-        .filter(r -> r.state().equals("open") && r.unit() == null && r.filled() < r.slots())
-        .map(Rotor::code)
-        .toList();
+    List<String> found =
+        session.read(book -> new Batches(book).show(of)).rotors().stream()
+            .filter(r -> r.state().equals("open") && r.unit() == null)
+            .filter(r -> drop ? r.planned() : r.filled() < r.slots())
+            .map(Rotor::code)
+            .toList();
+    if (found.isEmpty()) {
+      throw Refusal.refused(drop ? "plan.batch-unplanned" : "plan.batch-full", of)
+          .remedy("lodebook batch show " + of);
+    }
+    return found;
   }
 
   private int plan(List<String> wanted) {

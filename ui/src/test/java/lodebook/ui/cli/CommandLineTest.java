@@ -83,6 +83,17 @@ class CommandLineTest {
         "--jsn");
     wrong("lodebook: FILE is missing\ntry: lodebook help lot import\n", "lot", "import");
     wrong(
+        "lodebook: --name NAME, INITIALS are missing\ntry: lodebook help person add\n",
+        "person",
+        "add");
+    wrong(
+        "lodebook: --name stands twice\ntry: lodebook help person add\n",
+        "person",
+        "add",
+        "X",
+        "--name=X",
+        "--name=Y");
+    wrong(
         """
         lodebook: --role is boss, expected one of bench, inspector, planner, lead
         try: lodebook help person add

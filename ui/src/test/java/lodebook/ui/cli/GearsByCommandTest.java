@@ -62,6 +62,13 @@ class GearsByCommandTest {
         shop.does("batch", "show", "b-1"));
     refused(
         "B-1 is taken already: it is a batch", "trace B-1", "batch open b-1 --gear STIR --count 1");
+    refused("no open rotor of batch B-1 has a plan", "batch show B-1", "plan --batch B-1 --drop");
+    shop.does("place", "B-1-0001", shop.file("i.csv", Day.ring("L-2404", 12, -90)));
+    shop.does("place", "B-1-0002", shop.file("o.csv", Day.ring("L-2407", 16, 90)));
+    refused(
+        "no open rotor of batch B-1 has an empty slot",
+        "batch show B-1",
+        "plan --batch B-1 --from L-2404");
     refused("there is no batch B-9", "batch list", "batch show B-9");
     assertEquals(
         new Shop.Said(
