@@ -1,5 +1,8 @@
 package lodebook.assembly.survey;
 
+import java.util.LinkedHashMap;
+import java.util.Map;
+
 /// What is believed before the first reading. Each is a probability.
 ///
 /// @param reversed per placed magnet, that it is reversed
@@ -37,4 +40,47 @@ public record Priors(
   public static final Priors DEFAULT =
       new Priors(
           0.02, 0.1, 0.002, 0.002, 0.001, 0.004, 0.00003, 0.0015, 0.05, 0.01, 0.02, 0.02, 0.005);
+
+  /// The priors by the names under which a shop settles them, in their own order.
+  public Map<String, Double> byName() {
+    Map<String, Double> names = new LinkedHashMap<>();
+    names.put("prior-reversed", reversed);
+    names.put("prior-further-reversed", furtherReversed);
+    names.put("prior-quarter-turn", quarterTurn);
+    names.put("prior-turned", turned);
+    names.put("prior-missing", missing);
+    names.put("prior-weak", weak);
+    names.put("prior-strong", strong);
+    names.put("prior-wild-reading", wildReading);
+    names.put("prior-sign-inverted", signInverted);
+    names.put("prior-other-start", otherStart);
+    names.put("prior-opposite", opposite);
+    names.put("prior-unit-slip", unitSlip);
+    names.put("prior-whole-ring", wholeRing);
+    return names;
+  }
+
+  /// The same with some of them settled otherwise, by the names of [#byName()]; other names are
+  /// passed over.
+  public Priors with(Map<String, Double> settled) {
+    Map<String, Double> all = byName();
+    double[] values =
+        all.entrySet().stream()
+            .mapToDouble(each -> settled.getOrDefault(each.getKey(), each.getValue()))
+            .toArray();
+    return new Priors(
+        values[0],
+        values[1],
+        values[2],
+        values[3],
+        values[4],
+        values[5],
+        values[6],
+        values[7],
+        values[8],
+        values[9],
+        values[10],
+        values[11],
+        values[12]);
+  }
 }

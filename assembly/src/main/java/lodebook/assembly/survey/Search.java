@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 
 /// Finds the likeliest explanations of a set of rows.
 ///
@@ -24,9 +25,21 @@ final class Search {
 
   /// All explanations that were weighed, likeliest first.
   static List<Judged> explain(RowModel rows, Priors priors) {
+    return explain(rows, priors, null);
+  }
+
+  /// @param expected what the rows but for a few said, so that its own covariance can be used from
+  ///   the beginning; null where nothing is known
+  static List<Judged> explain(RowModel rows, Priors priors, @Nullable Explanation expected) {
     Judge judge = new Judge(rows, priors);
     Map<List<NamedFault>, Judged> weighed = new HashMap<>();
-    Judged best = weigh(judge, screening(rows), rows, priors, weighed);
+    Judged best =
+        expected == null
+            ? weigh(judge, screening(rows), rows, priors, weighed)
+            : weighRound(judge, expected, rows, priors, weighed);
+    if (expected != null && best.explanation().key().equals(expected.key())) {
+      return sorted(withoutIdleSuspects(judge, weighed));
+    }
     for (int round = 1; round < ROUNDS; round++) {
       Judged next = weighRound(judge, best.explanation(), rows, priors, weighed);
       if (next.explanation().key().equals(best.explanation().key())) {

@@ -24,8 +24,11 @@ final class Slips {
   private final List<Reading> readings;
   private final Priors priors;
   private final SlipCandidates candidates;
+  private final @Nullable Explanation expected;
 
-  Slips(RingModel ring, List<Reading> readings, Priors priors) {
+  /// @param expected what the readings but for the last few said, or null
+  Slips(RingModel ring, List<Reading> readings, Priors priors, @Nullable Explanation expected) {
+    this.expected = expected;
     this.ring = ring;
     this.readings = readings;
     this.priors = priors;
@@ -98,7 +101,8 @@ final class Slips {
 
   private Account searched(Slip slip) {
     RowModel rows = rows(slip);
-    return new Account(slip, rows, Search.explain(rows, priors), List.of());
+    @Nullable Explanation start = slip.equals(Slip.NONE) ? expected : null;
+    return new Account(slip, rows, Search.explain(rows, priors, start), List.of());
   }
 
   private Account withAlternatives(Account chosen) {

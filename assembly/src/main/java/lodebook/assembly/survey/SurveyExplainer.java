@@ -1,12 +1,26 @@
 package lodebook.assembly.survey;
 
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /// Says what a survey shows.
 ///
 /// One explainer serves one ring as built; it keeps the field's response at the points read so far,
 /// so further surveys of the same ring are quick. Safe for use by several threads.
 public final class SurveyExplainer {
+  /// What is said where there is nothing to judge.
+  static final Diagnosis NOTHING_READ =
+      new Diagnosis(
+          Verdict.CANNOT_TELL,
+          List.of(),
+          Measuring.AS_SET,
+          List.of(),
+          null,
+          List.of(),
+          null,
+          1,
+          Diagnosis.Reason.NOTHING_READ);
+
   private final RingModel ring;
   private final Priors priors;
 
@@ -36,6 +50,14 @@ public final class SurveyExplainer {
   ///
   /// @throws IllegalArgumentException if a reading names a slot that the layout does not have
   public Diagnosis explain(List<Reading> readings) {
+    @Nullable Account account = account(readings, null);
+    return account == null ? NOTHING_READ : diagnosis(readings, account);
+  }
+
+  /// The account of readings, or null where there is nothing to judge.
+  ///
+  /// @param expected what the readings but for the last few said, or null
+  @Nullable Account account(List<Reading> readings, @Nullable Explanation expected) {
     for (Reading reading : readings) {
       if (reading.slot() < 1 || reading.slot() > ring.slots()) {
         throw new IllegalArgumentException(
@@ -47,19 +69,12 @@ public final class SurveyExplainer {
                 + reading.slot());
       }
     }
-    if (readings.isEmpty() || ring.empty()) {
-      return new Diagnosis(
-          Verdict.CANNOT_TELL,
-          List.of(),
-          Measuring.AS_SET,
-          List.of(),
-          null,
-          List.of(),
-          null,
-          1,
-          Diagnosis.Reason.NOTHING_READ);
-    }
-    Account account = new Slips(ring, readings, priors).account();
+    return readings.isEmpty() || ring.empty()
+        ? null
+        : new Slips(ring, readings, priors, expected).account();
+  }
+
+  Diagnosis diagnosis(List<Reading> readings, Account account) {
     return new Conclusion(ring, readings, account, priors).diagnosis();
   }
 }

@@ -3,18 +3,22 @@ package lodebook.db.keep;
 import static lodebook.db.tables.Tables.CHAIN_HEAD;
 import static lodebook.db.tables.Tables.SETTING;
 
+import java.util.HashMap;
 import java.util.Map;
 import java.util.TreeMap;
+import lodebook.assembly.survey.Priors;
 import lodebook.db.book.Act;
 import lodebook.db.book.Book;
 import lodebook.db.refusal.Refusal;
 import lodebook.db.rights.Permission;
+import org.jooq.DSLContext;
 import org.jspecify.annotations.Nullable;
 
-/// What the shop has settled for its book: `name`, the book's name on papers, and `shop`, the
-/// shop's own.
+/// What the shop has settled for its book: `name`, the book's name on papers, `shop`, the shop's
+/// own, and what it believes of a survey before the first reading ([Priors#byName()]).
 public final class Settings {
   private static final int LONGEST = 100;
+  private static final double MOST_LIKELY = 0.5;
 
   private final Book book;
 
@@ -39,6 +43,10 @@ public final class Settings {
   /// One setting; an unknown name is refused.
   public String get(String name) {
     @Nullable String content = all().get(name);
+    Double prior = Priors.DEFAULT.byName().get(name);
+    if (content == null && prior != null) {
+      return prior.toString();
+    }
     if (content == null) {
       throw unknown(name);
     }
@@ -47,8 +55,12 @@ public final class Settings {
 
   /// Settles one.
   public void set(Act act, String name, String content) {
-    if (!name.equals("name") && !name.equals("shop")) {
+    boolean prior = Priors.DEFAULT.byName().containsKey(name);
+    if (!prior && !name.equals("name") && !name.equals("shop")) {
       throw unknown(name);
+    }
+    if (prior && !isProbability(content)) {
+      throw Refusal.wrongInput("setting.probability", name, content);
     }
     if (content.isBlank() || content.length() > LONGEST) {
       throw Refusal.wrongInput("setting.length", name, LONGEST).remedy("lodebook book setting");
@@ -70,6 +82,25 @@ public final class Settings {
           }
           writing.line().field(name, content);
         });
+  }
+
+  private static boolean isProbability(String content) {
+    try {
+      double value = Double.parseDouble(content);
+      return value > 0 && value <= MOST_LIKELY;
+    } catch (NumberFormatException notOne) {
+      return false;
+    }
+  }
+
+  /// What the shop believes of a survey before the first reading, inside a transaction: the default
+  /// where it settled nothing else.
+  public static Priors priors(DSLContext sql) {
+    Map<String, Double> settled = new HashMap<>();
+    sql.selectFrom(SETTING)
+        .where(SETTING.NAME.in(Priors.DEFAULT.byName().keySet()))
+        .forEach(r -> settled.put(r.getName(), Double.valueOf(r.getContent())));
+    return Priors.DEFAULT.with(settled);
   }
 
   private static Refusal unknown(String name) {

@@ -3,6 +3,7 @@ package lodebook.db.surveys;
 import java.util.List;
 import java.util.Set;
 import lodebook.assembly.layout.RingDesign;
+import lodebook.assembly.survey.Priors;
 import lodebook.assembly.survey.Reading;
 import lodebook.assembly.survey.SurveyedRing;
 
@@ -13,6 +14,7 @@ import lodebook.assembly.survey.SurveyedRing;
 /// @param design what the rotor is built to
 /// @param readings all readings in the order in which they were recorded
 /// @param seen the last line of history when it was read
+/// @param priors what the shop believes before the first reading
 /// @param stages the ring as it stood, and the readings recorded while it stood so; in order
 public record RecordedSurvey(
     List<String> surveys,
@@ -20,6 +22,7 @@ public record RecordedSurvey(
     RingDesign design,
     List<RecordedReading> readings,
     long seen,
+    Priors priors,
     List<Stage> stages) {
   public RecordedSurvey {
     surveys = List.copyOf(surveys);
@@ -36,9 +39,12 @@ public record RecordedSurvey(
   ///
   /// @param ring the ring by the record
   /// @param readings what was read
+  /// @param from the survey of each reading
   /// @param changedSince slots whose magnet was changed between this stage and the last
-  public record Stage(SurveyedRing ring, List<Reading> readings, Set<Integer> changedSince) {
+  public record Stage(
+      SurveyedRing ring, List<Reading> readings, List<String> from, Set<Integer> changedSince) {
     public Stage {
+      from = List.copyOf(from);
       readings = List.copyOf(readings);
       changedSince = Set.copyOf(changedSince);
     }

@@ -40,6 +40,14 @@ public final class SurveyChecks {
     return new Checked(survey, StagedExplanation.of(survey));
   }
 
+  /// Explains surveys with the book kept open; writes nothing.
+  ///
+  /// @param codes surveys of one rotor, or one rotor for its latest survey
+  public static Checked check(Book book, List<String> codes) {
+    RecordedSurvey survey = new Surveys(book).asRecorded(codes);
+    return new Checked(survey, StagedExplanation.of(survey));
+  }
+
   /// Records what a check of one survey said, so that the survey carries its verdict; a check of
   /// several surveys together is nobody's and is not recorded.
   public void store(Act act, Checked checked) {

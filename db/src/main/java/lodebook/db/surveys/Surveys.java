@@ -27,6 +27,7 @@ import lodebook.db.builds.Rotors;
 import lodebook.db.code.Code;
 import lodebook.db.code.CodeKind;
 import lodebook.db.code.Codes;
+import lodebook.db.keep.Settings;
 import lodebook.db.refusal.Refusal;
 import lodebook.db.rights.Permission;
 import lodebook.db.rights.Role;
@@ -306,6 +307,7 @@ public final class Surveys {
         design,
         readings,
         sql.select(CHAIN_HEAD.SEQUENCE).from(CHAIN_HEAD).fetchSingle().value1(),
+        Settings.priors(sql),
         stages(sql, rotor.getId(), design, readings));
   }
 
@@ -328,13 +330,16 @@ public final class Surveys {
     Strengths strengths = new Strengths(sql, rotorId);
     List<Map<Integer, RecordedPlacement>> states = new ArrayList<>();
     List<List<Reading>> read = new ArrayList<>();
+    List<List<String>> from = new ArrayList<>();
     for (RecordedReading reading : readings) {
       Map<Integer, RecordedPlacement> state = rings.before(reading.sequence());
       if (states.isEmpty() || !states.getLast().equals(state)) {
         states.add(state);
         read.add(new ArrayList<>());
+        from.add(new ArrayList<>());
       }
       read.getLast().add(reading.reading());
+      from.getLast().add(reading.survey());
     }
     List<RecordedSurvey.Stage> stages = new ArrayList<>();
     for (int i = 0; i < states.size(); i++) {
@@ -342,6 +347,7 @@ public final class Surveys {
           new RecordedSurvey.Stage(
               new SurveyedRing(design, strengths.of(states.get(i))),
               read.get(i),
+              from.get(i),
               changed(states.get(i), states.getLast())));
     }
     return stages;

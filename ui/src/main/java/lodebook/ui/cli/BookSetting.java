@@ -10,8 +10,20 @@ import picocli.CommandLine.Parameters;
 /// Shows or settles something for the whole book.
 @Command(
     name = "setting",
-    description = "Show or settle something for the whole book: name, shop.",
-    footer = {"", "Example:", "  lodebook book setting shop \"Workshop by the river\""})
+    description = {
+      "Show or settle something for the whole book: name, shop, and how likely faults and slips",
+      "are before the first reading of a survey, each a probability per magnet, reading or survey:",
+      "prior-reversed (0.02), prior-further-reversed (0.1), prior-quarter-turn (0.002),",
+      "prior-turned (0.002), prior-missing (0.001), prior-weak (0.004), prior-strong (0.00003),",
+      "prior-wild-reading (0.0015), prior-sign-inverted (0.05), prior-other-start (0.01),",
+      "prior-opposite (0.02), prior-unit-slip (0.02), prior-whole-ring (0.005)."
+    },
+    footer = {
+      "",
+      "Examples:",
+      "  lodebook book setting shop \"Workshop by the river\"",
+      "  lodebook book setting prior-missing 0.005"
+    })
 final class BookSetting extends Verb {
   @Parameters(index = "0", arity = "0..1", paramLabel = "NAME", description = "what")
   private @Nullable String name;

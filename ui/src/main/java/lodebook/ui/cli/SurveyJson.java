@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Locale;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.survey.Diagnosis;
+import lodebook.assembly.survey.Disagreement;
 import lodebook.assembly.survey.Evidence;
 import lodebook.assembly.survey.FaultKind;
 import lodebook.assembly.survey.Finding;
@@ -36,6 +37,11 @@ final class SurveyJson {
             .put(
                 "measureNext",
                 diagnosis.measureNext().stream().map(next -> next(next, words)).toList());
+    if (!diagnosis.disagreements().isEmpty()) {
+      document.put(
+          "disagreements",
+          diagnosis.disagreements().stream().map(SurveyJson::disagreement).toList());
+    }
     return document
         .putIfAny("wholeRing", wholeRing(diagnosis.wholeRing()))
         .put("fitProbability", diagnosis.fitProbability())
@@ -55,6 +61,15 @@ final class SurveyJson {
     return finding.alsoPossibleSlots().isEmpty()
         ? json
         : json.put("alsoPossibleSlots", finding.alsoPossibleSlots());
+  }
+
+  private static Json disagreement(Disagreement disagreement) {
+    return point(disagreement.point(), true)
+        .put("surveys", disagreement.surveys())
+        .put(
+            "readMilliTesla", disagreement.readTesla().stream().map(tesla -> tesla * 1000).toList())
+        .put("differenceMilliTesla", disagreement.differenceTesla() * 1000)
+        .put("bandMilliTesla", disagreement.bandTesla() * 1000);
   }
 
   private static Json evidence(Evidence evidence) {

@@ -7,6 +7,7 @@ import java.util.stream.Collectors;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.survey.Diagnosis;
+import lodebook.assembly.survey.Disagreement;
 import lodebook.assembly.survey.Evidence;
 import lodebook.assembly.survey.Finding;
 import lodebook.assembly.survey.MeasureNext;
@@ -48,6 +49,7 @@ final class SurveyWords {
     if (!table.isEmpty()) {
       parts.add(table.text());
     }
+    diagnosis.disagreements().forEach(d -> parts.add(disagreement(d)));
     addRunnerUp(diagnosis, parts);
     diagnosis.measureNext().forEach(n -> parts.add(measure(n)));
     return parts.stream().map(SurveyWords::wrapped).collect(Collectors.joining("\n"));
@@ -140,6 +142,20 @@ final class SurveyWords {
       ways.add(words.say("whole-ring.offset", Amounts.fixed(offset * 1000, 2)));
     }
     return words.say("whole-ring", String.join(words.say("or"), ways));
+  }
+
+  private String disagreement(Disagreement where) {
+    ProbePoint point = where.point();
+    return words.say(
+        "disagreement",
+        point.slot(),
+        words.say("spot." + LayoutWords.word(point.spot())),
+        words.say("component." + LayoutWords.word(point.component())),
+        where.surveys().getFirst(),
+        Amounts.milliTesla(where.readTesla().getFirst()),
+        where.surveys().getLast(),
+        Amounts.milliTesla(where.readTesla().getLast()),
+        Amounts.milliTesla(where.bandTesla()));
   }
 
   private static void row(Table table, Evidence evidence) {

@@ -25,13 +25,21 @@ public final class ProbedLayout {
   /// @param design the layout with its magnet types
   /// @param grades the grades that the book knows
   public static ProbeDesign of(RingDesign design, List<Grade> grades) {
+    return new ProbeDesign(new SurveyedRing(design, magnets(design, grades)), METER);
+  }
+
+  /// Magnets as they usually come, by slot.
+  ///
+  /// @param design the layout with its magnet types
+  /// @param grades the grades that the book knows
+  public static Map<Integer, PlacedMagnet> magnets(RingDesign design, List<Grade> grades) {
     Map<String, Grade> byName = new HashMap<>();
     grades.forEach(grade -> byName.put(grade.name(), grade));
     Map<Integer, PlacedMagnet> magnets = new HashMap<>();
     for (int slot = 1; slot <= design.slots(); slot++) {
       magnets.put(slot, magnet(byName.get(design.typeAt(slot).grade()), design, slot));
     }
-    return new ProbeDesign(new SurveyedRing(design, magnets), METER);
+    return magnets;
   }
 
   private static PlacedMagnet magnet(@Nullable Grade grade, RingDesign design, int slot) {
