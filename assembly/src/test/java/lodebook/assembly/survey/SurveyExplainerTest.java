@@ -100,6 +100,38 @@ class SurveyExplainerTest {
     assertEquals(List.of(new NamedFault(2, FaultKind.REVERSED)), named(diagnosis));
   }
 
+  /// Seen in a mirror through slot 1 and the axis, slot 10 is slot 4 and tangential readings turn.
+  @Test
+  void aRingInAMirrorNamesTheMirroredSlot() {
+    RingTruth truth = truth(TENTH_REVERSED, 3);
+    Map<Integer, PlacedMagnet> mirrored = new HashMap<>();
+    truth.recorded().magnets().forEach((slot, m) -> mirrored.put(mirror(slot), m));
+    List<Reading> readings =
+        truth.read(12, EXACT, 0, 0).stream()
+            .map(
+                r ->
+                    new Reading(
+                        mirror(r.slot()),
+                        r.spot(),
+                        r.component(),
+                        r.component() == Component.RADIAL ? r.fluxTesla() : -r.fluxTesla(),
+                        r.unit(),
+                        null,
+                        null,
+                        null,
+                        r.meter()))
+            .toList();
+    Diagnosis plain = explain(truth.recorded(), truth.read(12, EXACT, 0, 0));
+    Diagnosis diagnosis = explain(new SurveyedRing(TWELVE, mirrored), readings);
+    assertEquals(Verdict.FAULT, plain.verdict());
+    assertEquals(Verdict.FAULT, diagnosis.verdict());
+    assertEquals(List.of(new NamedFault(4, FaultKind.REVERSED)), named(diagnosis));
+  }
+
+  private static int mirror(int slot) {
+    return Math.floorMod(1 - slot, 12) + 1;
+  }
+
   @Test
   void lookAlikeStartsNameTheOtherSlotsAndTheReadingThatSettlesIt() {
     RingTruth truth = truth(TENTH_REVERSED, 4);
