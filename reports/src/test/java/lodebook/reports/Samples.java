@@ -202,6 +202,9 @@ public final class Samples {
         "GEAR-1 rev A",
         steps,
         inFillingOrder,
+        inFillingOrder
+            ? List.of("Order of filling: every second slot, then those between.")
+            : List.of(),
         finished,
         new HandlingFigures(27.3, 0.0412, 0.0943, 0.0219, 80));
   }

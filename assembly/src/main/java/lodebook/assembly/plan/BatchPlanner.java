@@ -14,12 +14,15 @@ import java.util.TreeMap;
 import lodebook.assembly.layout.Facing;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.layout.RingDesign;
+import org.jspecify.annotations.Nullable;
 
 /// Plans all rotors of a batch from common stock: rotors of a layout alike in working amplitude,
 /// each low in unwanted harmonics.
 public final class BatchPlanner {
   /// Tried exchanges for each slot of the batch.
   private static final long STEPS_A_SLOT = 10_000;
+
+  private static final double STEPS_A_SECOND = 2.4e6;
 
   private final BatchTask task;
   private final HarmonicForm[] forms;
@@ -42,6 +45,35 @@ public final class BatchPlanner {
   public static Effort usualEffort(BatchTask task) {
     long slots = task.rings().stream().mapToLong(ring -> ring.design().slots()).sum();
     return new Effort(STEPS_A_SLOT * slots, () -> true, ratio -> {});
+  }
+
+  /// An effort of about so many seconds.
+  ///
+  /// @param seconds seconds of one processor, by experience and not by a clock
+  public static Effort seconds(double seconds) {
+    return new Effort(Math.max(1, Math.round(STEPS_A_SECOND * seconds)), () -> true, ratio -> {});
+  }
+
+  /// Mean unwanted harmonics of the rotors where any lots may go together, to set beside those of a
+  /// plan in which they may not; null where they may. A quarter of the effort is taken.
+  public @Nullable Double freelyMixed(long seed, Effort effort) {
+    if (task.mix() == MixPolicy.FREE || task.lots().size() < 2) {
+      return null;
+    }
+    BatchTask free =
+        new BatchTask(
+            task.rings(),
+            task.candidates(),
+            task.unmeasured(),
+            MixPolicy.FREE,
+            task.wished(),
+            task.apart());
+    Effort quick = new Effort(effort.steps() / 4 + 1, effort.keepGoing(), ratio -> {});
+    return new BatchPlanner(free)
+        .plan(seed, quick).plans().values().stream()
+            .mapToDouble(RotorPlan::unwantedHarmonics)
+            .average()
+            .orElse(0);
   }
 
   /// The best plans found.

@@ -2,7 +2,10 @@ package lodebook.assembly.plan;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import lodebook.assembly.layout.RingDesign;
 
 /// Rotors to be planned together from common stock.
@@ -55,6 +58,13 @@ public record BatchTask(
   public BatchTask(
       List<Ring> rings, List<Candidate> candidates, List<LotSupply> unmeasured, MixPolicy mix) {
     this(rings, candidates, unmeasured, mix, Map.of(), LotsApart.NONE);
+  }
+
+  /// Lots that may be drawn from.
+  Set<String> lots() {
+    return Stream.concat(
+            candidates.stream().map(Candidate::lot), unmeasured.stream().map(LotSupply::lot))
+        .collect(Collectors.toSet());
   }
 
   /// Index of the ring that must have a piece, or −1.

@@ -2,6 +2,7 @@ package lodebook.assembly.plan;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 
 /// Orders of filling that a person can follow.
 public enum OrderPattern {
@@ -33,6 +34,21 @@ public enum OrderPattern {
       return inParts(start, slots, 4);
     }
   };
+
+  /// The pattern that some steps follow, or null where they follow none.
+  ///
+  /// @param filled slots in the order in which they are filled; others are left out
+  /// @param slots slots of the ring
+  public static @Nullable OrderPattern of(List<Integer> filled, int slots) {
+    for (OrderPattern pattern : values()) {
+      for (int start = 1; start <= slots; start++) {
+        if (pattern.from(start, slots).stream().filter(filled::contains).toList().equals(filled)) {
+          return pattern;
+        }
+      }
+    }
+    return null;
+  }
 
   /// All slots in this order.
   ///

@@ -9,6 +9,7 @@ import org.jspecify.annotations.Nullable;
 /// @param rotor the rotor
 /// @param seed seed of the search
 /// @param settings how it was asked for
+/// @param stockLine line of the history up to which the stock was seen
 /// @param programVersion version of the program that planned
 /// @param unwantedHarmonics ratio, of this plan
 /// @param lowerBound ratio, proven for every order of its pieces, or null
@@ -21,6 +22,7 @@ public record Plan(
     String rotor,
     long seed,
     String settings,
+    long stockLine,
     String programVersion,
     double unwantedHarmonics,
     @Nullable Double lowerBound,

@@ -40,6 +40,7 @@ final class PlanRows {
                     rotor,
                     row.get(PLAN.SEED),
                     row.get(PLAN.SETTINGS),
+                    row.get(PLAN.STOCK_SEQUENCE),
                     row.get(PLAN.PROGRAM_VERSION),
                     row.get(PLAN.UNWANTED_HARMONICS),
                     row.get(PLAN.LOWER_BOUND),

@@ -17,6 +17,8 @@ import org.jspecify.annotations.Nullable;
 /// @param gear the gear model with its revision, such as "GEAR-1 rev A", or null
 /// @param steps the magnets in the order of this list
 /// @param inFillingOrder whether the order is a planned order of filling; else it is that of slots
+/// @param planned sentences about the plan in the sheet's language: the order of filling, its
+///   figures, what the latest survey showed
 /// @param finished readings of the finished ring, taken after the last step; empty where the steps'
 ///   own readings are those of the finished ring
 /// @param handling figures for the notices
@@ -29,10 +31,12 @@ public record Traveller(
     @Nullable String gear,
     List<Step> steps,
     boolean inFillingOrder,
+    List<String> planned,
     List<ExpectedReading> finished,
     HandlingFigures handling) {
   public Traveller {
     steps = List.copyOf(steps);
+    planned = List.copyOf(planned);
     finished = List.copyOf(finished);
   }
 }

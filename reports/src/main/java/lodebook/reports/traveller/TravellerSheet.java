@@ -79,7 +79,10 @@ public final class TravellerSheet {
     Table steps = tables.steps(flow, traveller);
     flow.heading(
         words.say(traveller.inFillingOrder() ? "step.title.filling" : "step.title.slots"),
-        17 + steps.startHeight());
+        17 + 6 * traveller.planned().size() + steps.startHeight());
+    for (String sentence : traveller.planned()) {
+      flow.paragraph(sentence, Lettering.bold(11));
+    }
     flow.paragraph(words.say("step.explained"), Lettering.plain(11));
     flow.gap(1.5);
     steps.set();

@@ -1,8 +1,11 @@
 package lodebook.ui.cli;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
+import lodebook.assembly.survey.Verdict;
 import lodebook.reports.traveller.TravellerSheet;
+import lodebook.ui.craft.PlannedRing;
 import lodebook.ui.paper.Travellers;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -39,10 +42,29 @@ final class PaperTraveller extends Verb {
                 rotors.stream()
                     .map(rotor -> Travellers.read(book, rotor, session.facts(book)))
                     .toList());
-    OutputFile.write(file, TravellerSheet.pdf(materials.stream().map(Travellers::of).toList()));
+    OutputFile.write(file, TravellerSheet.pdf(materials.stream().map(m -> Travellers.of(m, planned(m))).toList()));
     List<String> shown = materials.stream().map(m -> m.shown().rotor().code()).toList();
     session.done("traveller.written", String.join(", ", shown), file, shown.size());
     session.next("lodebook place " + shown.getFirst() + " placements.csv");
     return 0;
+  }
+
+  private List<String> planned(Travellers.Material material) {
+    List<String> sentences = new ArrayList<>();
+    PlannedRing ring = material.ring();
+    if (ring != null) {
+      PlanWords words = new PlanWords(session.words());
+      sentences.add(words.order(ring) + ".");
+      sentences.add(words.head(ring.plan()) + ".");
+    }
+    String survey = material.shown().rotor().latestSurvey();
+    if (survey != null) {
+      Verdict verdict = material.verdict();
+      sentences.add(
+          verdict == null
+              ? session.words().say("rotor.survey-unchecked", survey) + "."
+              : session.words().say("traveller.survey", survey, verdict.word()) + ".");
+    }
+    return sentences;
   }
 }

@@ -4,16 +4,22 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
-import java.util.stream.Collectors;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
 import lodebook.assembly.plan.MixPolicy;
+import lodebook.assembly.plan.RotorPlan;
 import lodebook.db.builds.Batches;
-import lodebook.db.builds.Plan;
+import lodebook.db.builds.MagnetName;
 import lodebook.db.builds.Plans;
 import lodebook.db.builds.Rotor;
 import lodebook.db.refusal.Refusal;
 import lodebook.ui.craft.PlanWish;
+import lodebook.ui.craft.Planned;
 import lodebook.ui.craft.PlannedRing;
 import lodebook.ui.craft.Planning;
+import lodebook.ui.craft.WhatIf;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -23,10 +29,13 @@ import picocli.CommandLine.Parameters;
 @Command(
     name = "plan",
     description = "Plan which piece goes into which slot, which way and in which order.",
-    footer = {"", "Example:", "  lodebook plan R-0001 --from L-2404"})
+    footer = {
+      "",
+      "Examples:",
+      "  lodebook plan R-0001 --from L-2404",
+      "  lodebook plan --batch B-31 --from L-1,L-2,L-3 --apart L-1,L-3 --keep-for R-7=L-1/0017"
+    })
 final class PlanCommand extends Verb {
-  private static final String VERSION = "0.1.0";
-
   @Parameters(arity = "0..*", paramLabel = "ROTOR", description = "open rotors")
   private List<String> rotors = new ArrayList<>();
 
@@ -45,8 +54,42 @@ final class PlanCommand extends Verb {
   @Option(names = "--seed", paramLabel = "N", description = "the same seed gives the same plan")
   private long seed = 1;
 
-  @Option(names = "--seconds", paramLabel = "S", description = "how long to search")
+  @Option(
+      names = "--seconds",
+      paramLabel = "S",
+      description = "how long to search at most; the best so far is kept")
   private @Nullable Double seconds;
+
+  @Option(
+      names = "--apart",
+      paramLabel = "LOT,LOT",
+      description = "lots that must not be mixed in one rotor; may be given several times")
+  private List<String> apart = new ArrayList<>();
+
+  @Option(
+      names = "--keep-for",
+      paramLabel = "ROTOR=PIECE[,PIECE]",
+      description =
+          "pieces for one rotor only: it must have them where it is planned, others must not; may be"
+              + " given several times")
+  private List<String> keepFor = new ArrayList<>();
+
+  @Option(
+      names = "--without",
+      paramLabel = "PIECE",
+      split = ",",
+      description = "pieces that are not used")
+  private List<String> without = new ArrayList<>();
+
+  @Option(
+      names = "--compare",
+      description = "what if: as they come, sorted and planned side by side; stores nothing")
+  private boolean compare;
+
+  @Option(
+      names = "--progress",
+      description = "tell the best so far although standard error is no terminal")
+  private boolean progress;
 
   @Option(names = "--drop", description = "drop the plans; what isn't built is free again")
   private boolean drop;
@@ -102,21 +145,92 @@ final class PlanCommand extends Verb {
 
   private int plan(List<String> wanted) {
     PlanWish wish =
-        new PlanWish(wanted, lots, MixPolicy.valueOf(mix.toUpperCase(Locale.ROOT)), seed, seconds);
-    FillWords fill = new FillWords(session.words());
-    List<Plan> plans = new Planning(session::opened, fill::of, VERSION).plan(session.act(), wish);
-    List<PlannedRing> rings =
-        session.read(book -> plans.stream().map(p -> PlannedRing.of(book, p)).toList());
-    List<Json> documents = rings.stream().map(PlanJson::of).toList();
+        new PlanWish(
+            wanted,
+            lots,
+            MixPolicy.valueOf(mix.toUpperCase(Locale.ROOT)),
+            apart(),
+            keptFor(),
+            Set.copyOf(without),
+            seed,
+            seconds);
+    Planning planning =
+        new Planning(
+            session::opened,
+            new FillWords(session.words()),
+            BuiltVersion.text(),
+            new PlanProgress(session, progress));
     boolean several = batch != null || wanted.size() > 1;
-    Json document = several ? Json.object().put("plans", documents) : documents.getFirst();
-    if (!session.json(document)) {
-      PlanWords words = new PlanWords(session.words());
-      session.say(rings.stream().map(words::of).collect(Collectors.joining("\n\n")));
+    return compare ? compare(planning, wish) : store(planning, wish, several);
+  }
+
+  private int compare(Planning planning, PlanWish wish) {
+    WhatIf whatIf = planning.compare(wish);
+    if (!session.json(PlanJson.of(whatIf))) {
+      session.say(new CompareWords(session.words()).of(whatIf));
+    }
+    String what = batch == null ? String.join(" ", wish.rotors()) : "--batch " + batch;
+    session.next("lodebook plan " + what + " --from " + String.join(",", lots));
+    return 0;
+  }
+
+  private int store(Planning planning, PlanWish wish, boolean several) {
+    Planned planned = planning.plan(session.act(), wish);
+    PlanWords words = new PlanWords(session.words());
+    if (session.common().json || !several) {
+      List<PlannedRing> rings =
+          session.read(book -> planned.plans().stream().map(p -> PlannedRing.of(book, p)).toList());
+      PlannedRing first = rings.getFirst();
+      RotorPlan computed = planned.computed().get(first.plan().rotor());
+      if (session.common().json) {
+        session.json(several ? PlanJson.together(rings, planned) : PlanJson.of(first, computed));
+      } else {
+        session.say(words.of(first, computed));
+      }
+    } else {
+      session.say(words.together(planned));
+    }
+    if (planned.cutShort()) {
+      session.warn(session.words().say("plan.cut-short"));
     }
     session.tellBook(session.address());
-    session.next(
-        "lodebook paper traveller " + wanted.getFirst() + " -o " + wanted.getFirst() + ".pdf");
+    String rotor = planned.plans().getFirst().rotor();
+    session.next("lodebook paper traveller " + rotor + " -o " + rotor + ".pdf");
     return 0;
+  }
+
+  private List<Set<String>> apart() {
+    List<Set<String>> groups = new ArrayList<>();
+    for (String each : apart) {
+      Set<String> group = new TreeSet<>(names(each));
+      if (group.size() < 2) {
+        throw wrongLine("plan.apart-form", each);
+      }
+      groups.add(group);
+    }
+    return groups;
+  }
+
+  private Map<String, String> keptFor() {
+    Map<String, String> kept = new TreeMap<>();
+    for (String each : keepFor) {
+      int sign = each.indexOf('=');
+      List<String> pieces = sign < 1 ? List.of() : names(each.substring(sign + 1));
+      if (pieces.isEmpty()) {
+        throw wrongLine("plan.keep-for-form", each);
+      }
+      String rotor = each.substring(0, sign).strip();
+      for (String piece : pieces) {
+        String before = kept.put(MagnetName.of(piece).toString(), rotor);
+        if (before != null && !before.equalsIgnoreCase(rotor)) {
+          throw wrongLine("plan.keep-for-twice", piece, before, rotor);
+        }
+      }
+    }
+    return kept;
+  }
+
+  private static List<String> names(String text) {
+    return Arrays.stream(text.split(",", -1)).map(String::strip).filter(n -> !n.isEmpty()).toList();
   }
 }

@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /// What the program finds around itself when it runs.
@@ -20,6 +21,11 @@ record Surroundings(Map<String, String> env, PrintStream out, PrintStream err, C
   @Nullable String variable(String name) {
     String content = env.get(name);
     return content == null || content.isBlank() ? null : content;
+  }
+
+  /// Whether a person watches a terminal while a command of the whole process runs.
+  boolean watched() {
+    return variable("TERM") != null && Objects.requireNonNull(System.console()).isTerminal();
   }
 
   /// The language of the system, by the variables that POSIX names.

@@ -3,22 +3,16 @@ package lodebook.ui.craft;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.function.Function;
+import java.util.function.DoubleConsumer;
 import java.util.function.Supplier;
-import lodebook.assembly.plan.BatchPlanner;
 import lodebook.assembly.plan.BatchTask;
-import lodebook.assembly.plan.Effort;
 import lodebook.assembly.plan.FillingOrder;
 import lodebook.assembly.plan.FillingStep;
 import lodebook.assembly.plan.Placement;
 import lodebook.assembly.plan.RotorPlan;
-import lodebook.assembly.plan.RotorPlanner;
-import lodebook.assembly.plan.RotorTask;
-import lodebook.assembly.plan.Shortage;
 import lodebook.db.book.Act;
 import lodebook.db.book.Book;
 import lodebook.db.builds.Plan;
@@ -26,29 +20,33 @@ import lodebook.db.builds.PlanDraft;
 import lodebook.db.builds.PlanOutdated;
 import lodebook.db.builds.PlanStock;
 import lodebook.db.builds.Plans;
+import lodebook.db.builds.Rotor;
+import lodebook.db.builds.Rotors;
 
 /// Plans rotors from common stock: the stock is read, the plan computed with the book closed, then
 /// stored; where the stock changed meanwhile, once more.
 public final class Planning {
   private final Supplier<Book> opening;
-  private final Function<FillingStep, String> remarks;
+  private final StepWords words;
   private final String programVersion;
+  private final DoubleConsumer progress;
 
   /// @param opening opens the book
-  /// @param remarks what a builder is told about a step, empty for nothing
+  /// @param words what a builder is told about a step
   /// @param programVersion what plans are marked with
+  /// @param progress told the unwanted harmonics, a ratio, whenever they fell; by several threads
   public Planning(
-      Supplier<Book> opening, Function<FillingStep, String> remarks, String programVersion) {
+      Supplier<Book> opening, StepWords words, String programVersion, DoubleConsumer progress) {
     this.opening = opening;
-    this.remarks = remarks;
+    this.words = words;
     this.programVersion = programVersion;
+    this.progress = progress;
   }
 
   /// Plans and stores.
   ///
-  /// @return the plans that count from now on, in the order of the wish
   /// @throws PiecesShort where magnets are short
-  public List<Plan> plan(Act act, PlanWish wish) {
+  public Planned plan(Act act, PlanWish wish) {
     try {
       return planOnce(act, wish);
     } catch (PlanOutdated outdated) {
@@ -56,61 +54,51 @@ public final class Planning {
     }
   }
 
-  private List<Plan> planOnce(Act act, PlanWish wish) {
-    PlanStock stock;
-    try (Book book = opening.get()) {
-      stock = new Plans(book).stockFor(wish.rotors(), wish.lots());
-    }
-    Map<String, RotorPlan> plans = compute(stock, wish);
+  private Planned planOnce(Act act, PlanWish wish) {
+    PlanStock stock = stock(wish);
+    PlanSearch.Found found = new PlanSearch(stock, wish, progress).search(false);
     List<PlanDraft> drafts = new ArrayList<>();
     for (BatchTask.Ring ring : stock.rings()) {
-      RotorPlan plan = plans.get(ring.rotor());
-      if (plan == null) {
-        throw new IllegalStateException("no plan for " + ring.rotor());
-      }
-      drafts.add(draft(ring, plan, wish));
+      drafts.add(draft(ring, planOf(found, ring), wish));
     }
+    List<Plan> stored;
     try (Book book = opening.get()) {
-      return new Plans(book).store(act, stock, drafts);
+      stored = new Plans(book).store(act, stock, drafts);
+    }
+    return new Planned(
+        stored,
+        found.plans(),
+        found.leftOver(),
+        found.amplitudeSpread(),
+        found.freelyMixed(),
+        found.cutShort());
+  }
+
+  /// Sets the pieces as they come, sorted and planned side by side; stores nothing.
+  ///
+  /// @throws PiecesShort where magnets are short
+  public WhatIf compare(PlanWish wish) {
+    PlanStock stock;
+    List<Rotor> rotors = new ArrayList<>();
+    try (Book book = opening.get()) {
+      stock = new Plans(book).stockFor(wish.rotors(), wish.lots());
+      stock.rings().forEach(ring -> rotors.add(new Rotors(book).show(ring.rotor()).rotor()));
+    }
+    return new WhatIf(rotors, new PlanSearch(stock, wish, progress).search(true).compared());
+  }
+
+  private PlanStock stock(PlanWish wish) {
+    try (Book book = opening.get()) {
+      return new Plans(book).stockFor(wish.rotors(), wish.lots());
     }
   }
 
-  private static Map<String, RotorPlan> compute(PlanStock stock, PlanWish wish) {
-    return stock.rings().size() == 1 ? one(stock, wish) : several(stock, wish);
-  }
-
-  private static Map<String, RotorPlan> one(PlanStock stock, PlanWish wish) {
-    BatchTask.Ring ring = stock.rings().getFirst();
-    RotorTask task =
-        new RotorTask(
-            ring.design().layout(),
-            stock.candidates(),
-            stock.unmeasured(),
-            ring.kept(),
-            wish.mix(),
-            null);
-    refuseShort(RotorPlanner.shortages(task));
-    int slots = ring.design().slots();
-    Double seconds = wish.seconds();
-    Effort effort = seconds == null ? Effort.usual(slots) : Effort.seconds(slots, seconds);
-    return Map.of(ring.rotor(), RotorPlanner.of(ring.design(), task).plan(wish.seed(), effort));
-  }
-
-  private static Map<String, RotorPlan> several(PlanStock stock, PlanWish wish) {
-    BatchTask task =
-        new BatchTask(stock.rings(), stock.candidates(), stock.unmeasured(), wish.mix());
-    refuseShort(BatchPlanner.shortages(task));
-    int slots = stock.rings().stream().mapToInt(r -> r.design().slots()).sum();
-    Double seconds = wish.seconds();
-    Effort effort =
-        seconds == null ? BatchPlanner.usualEffort(task) : Effort.seconds(slots, seconds);
-    return new LinkedHashMap<>(new BatchPlanner(task).plan(wish.seed(), effort).plans());
-  }
-
-  private static void refuseShort(List<Shortage> shortages) {
-    if (!shortages.isEmpty()) {
-      throw new PiecesShort(shortages);
+  private static RotorPlan planOf(PlanSearch.Found found, BatchTask.Ring ring) {
+    RotorPlan plan = found.plans().get(ring.rotor());
+    if (plan == null) {
+      throw new IllegalStateException("no plan for " + ring.rotor());
     }
+    return plan;
   }
 
   private PlanDraft draft(BatchTask.Ring ring, RotorPlan plan, PlanWish wish) {
@@ -126,7 +114,7 @@ public final class Planning {
     Map<Integer, String> told = new HashMap<>();
     for (FillingStep step : FillingOrder.of(ring.design(), remanences, filled).steps()) {
       steps.put(step.slot(), step.step());
-      String remark = remarks.apply(step);
+      String remark = words.of(ring.design().layout(), step);
       if (!remark.isEmpty()) {
         told.put(step.slot(), remark);
       }

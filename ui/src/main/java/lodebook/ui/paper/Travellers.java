@@ -3,9 +3,11 @@ package lodebook.ui.paper;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
 import lodebook.assembly.layout.RingDesign;
 import lodebook.assembly.magnet.Grade;
 import lodebook.assembly.safety.HandlingFigures;
+import lodebook.assembly.survey.Verdict;
 import lodebook.db.book.Book;
 import lodebook.db.builds.Batches;
 import lodebook.db.builds.Plan;
@@ -15,7 +17,9 @@ import lodebook.db.builds.RecordedPlacement;
 import lodebook.db.builds.Rotor;
 import lodebook.db.builds.RotorShown;
 import lodebook.db.builds.Rotors;
+import lodebook.db.refusal.Refusal;
 import lodebook.db.stock.Grades;
+import lodebook.db.surveys.Surveys;
 import lodebook.reports.traveller.ExpectedReading;
 import lodebook.reports.traveller.Step;
 import lodebook.reports.traveller.Traveller;
@@ -32,32 +36,59 @@ public final class Travellers {
   ///
   /// @param shown the rotor with what stands in it
   /// @param ring its plan, or null
+  /// @param verdict what the check of its latest survey said, or null
   /// @param grade grade of its magnets
   /// @param gear the gear model of its batch, or null
   /// @param facts what the sheet says about itself
   public record Material(
       RotorShown shown,
       @Nullable PlannedRing ring,
+      @Nullable Verdict verdict,
       Grade grade,
       @Nullable String gear,
       Facts facts) {}
 
-  /// Reads what the traveller of a rotor is made of.
+  /// Reads what the traveller of a rotor is made of; a plan that cannot be built any more is
+  /// refused with the pieces named.
   public static Material read(Book book, String code, Facts facts) {
     RotorShown shown = new Rotors(book).show(code);
     Rotor rotor = shown.rotor();
     PlannedRing ring =
         rotor.planned() ? PlannedRing.of(book, new Plans(book).show(rotor.code())) : null;
+    if (ring != null) {
+      refuseSpoilt(ring.plan());
+    }
+    String survey = rotor.latestSurvey();
     String named = shown.design().mainType().grade();
     Grade grade =
         new Grades(book)
             .list().stream().filter(g -> g.name().equals(named)).findFirst().orElseThrow();
     String batch = rotor.batch();
-    return new Material(shown, ring, grade, batch == null ? null : gear(book, batch), facts);
+    return new Material(
+        shown,
+        ring,
+        survey == null ? null : new Surveys(book).show(survey).verdict(),
+        grade,
+        batch == null ? null : gear(book, batch),
+        facts);
+  }
+
+  private static void refuseSpoilt(Plan plan) {
+    List<PlannedSlot> spoilt = plan.spoilt();
+    if (!spoilt.isEmpty()) {
+      String pieces =
+          spoilt.stream()
+              .map(s -> "%s (slot %d, %s)".formatted(s.magnet(), s.slot(), s.state()))
+              .collect(Collectors.joining(", "));
+      throw Refusal.refused("plan.spoilt", plan.rotor(), pieces)
+          .remedy("lodebook plan " + plan.rotor() + " " + plan.settings());
+    }
   }
 
   /// The traveller of a rotor; with no plan it says what stands and leaves the rest to the builder.
-  public static Traveller of(Material material) {
+  ///
+  /// @param planned sentences about the plan and the latest survey
+  public static Traveller of(Material material, List<String> planned) {
     Rotor rotor = material.shown().rotor();
     RingDesign design = material.shown().design();
     PlannedRing ring = material.ring();
@@ -73,6 +104,7 @@ public final class Travellers {
         material.gear(),
         steps(material.shown(), ring, expectations),
         ring != null,
+        planned,
         expectations == null ? List.of() : finished(expectations, design),
         HandlingFigures.of(design.mainType(), material.grade(), design.slots()));
   }
