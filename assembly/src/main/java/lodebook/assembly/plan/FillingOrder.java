@@ -31,7 +31,16 @@ public record FillingOrder(OrderPattern pattern, List<FillingStep> steps) {
   /// @param remanencesTesla of what stands or is to stand in each slot, slot 1 first, tesla
   /// @param filled slots that are filled already
   public static FillingOrder of(RingDesign design, double[] remanencesTesla, Set<Integer> filled) {
-    StepForces forces = new StepForces(design, new UnitForces(design), remanencesTesla);
+    return of(new UnitForces(design), remanencesTesla, filled);
+  }
+
+  /// The same with forces that are known already; for many rings of one design.
+  ///
+  /// @param unitForces between the magnets of the design
+  public static FillingOrder of(
+      UnitForces unitForces, double[] remanencesTesla, Set<Integer> filled) {
+    RingDesign design = unitForces.design();
+    StepForces forces = new StepForces(design, unitForces, remanencesTesla);
     FillingOrder best = null;
     for (OrderPattern pattern : OrderPattern.values()) {
       for (int start = 1; start <= design.layout().segmentsPerPolePair(); start++) {

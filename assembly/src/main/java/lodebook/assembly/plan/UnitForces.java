@@ -17,7 +17,7 @@ import lodebook.assembly.magnet.MagnetType;
 ///
 /// Facings are those of the rule and polarisations stay as they are, whatever the field (recoil
 /// makes forces a few per cent smaller). Magnets more than twelve slots away are left out.
-final class UnitForces {
+public final class UnitForces {
   /// How far the magnet is drawn out, as a part of its size in that direction.
   static final double[] DRAWN_OUT = {0, 0.05, 0.25, 0.5, 0.75, 1, 1.2};
 
@@ -28,10 +28,15 @@ final class UnitForces {
   private final int period;
   private final Map<Integer, Vector3[]> known = new HashMap<>();
 
-  UnitForces(RingDesign design) {
+  /// Forces in a ring; each is computed when it is asked for first. Not for several threads.
+  public UnitForces(RingDesign design) {
     this.design = design;
     slots = design.slots();
     period = design.layout().segmentsPerPolePair();
+  }
+
+  RingDesign design() {
+    return design;
   }
 
   /// Force on one magnet from another in the first one's slot directions (radial, to next, axial),

@@ -1,5 +1,6 @@
 package lodebook.ui.cli;
 
+import java.io.Console;
 import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.file.Files;
@@ -7,7 +8,6 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /// What the program finds around itself when it runs.
@@ -24,8 +24,10 @@ record Surroundings(Map<String, String> env, PrintStream out, PrintStream err, C
   }
 
   /// Whether a person watches a terminal while a command of the whole process runs.
+  @SuppressWarnings("SystemConsoleNull") // without a terminal some runtimes have none
   boolean watched() {
-    return variable("TERM") != null && Objects.requireNonNull(System.console()).isTerminal();
+    Console console = System.console();
+    return variable("TERM") != null && console != null && console.isTerminal();
   }
 
   /// The language of the system, by the variables that POSIX names.

@@ -8,11 +8,13 @@ import java.util.Map;
 import java.util.Set;
 import java.util.function.DoubleConsumer;
 import java.util.function.Supplier;
+import lodebook.assembly.layout.RingDesign;
 import lodebook.assembly.plan.BatchTask;
 import lodebook.assembly.plan.FillingOrder;
 import lodebook.assembly.plan.FillingStep;
 import lodebook.assembly.plan.Placement;
 import lodebook.assembly.plan.RotorPlan;
+import lodebook.assembly.plan.UnitForces;
 import lodebook.db.book.Act;
 import lodebook.db.book.Book;
 import lodebook.db.builds.Plan;
@@ -58,8 +60,10 @@ public final class Planning {
     PlanStock stock = stock(wish);
     PlanSearch.Found found = new PlanSearch(stock, wish, progress).search(false);
     List<PlanDraft> drafts = new ArrayList<>();
+    Map<RingDesign, UnitForces> forces = new HashMap<>();
     for (BatchTask.Ring ring : stock.rings()) {
-      drafts.add(draft(ring, planOf(found, ring), wish));
+      UnitForces ofRing = forces.computeIfAbsent(ring.design(), UnitForces::new);
+      drafts.add(draft(ring, planOf(found, ring), wish, ofRing));
     }
     List<Plan> stored;
     try (Book book = opening.get()) {
@@ -101,7 +105,7 @@ public final class Planning {
     return plan;
   }
 
-  private PlanDraft draft(BatchTask.Ring ring, RotorPlan plan, PlanWish wish) {
+  private PlanDraft draft(BatchTask.Ring ring, RotorPlan plan, PlanWish wish, UnitForces forces) {
     double[] remanences = new double[ring.design().slots()];
     Set<Integer> filled = new HashSet<>();
     for (Placement placement : plan.placements()) {
@@ -112,7 +116,7 @@ public final class Planning {
     }
     Map<Integer, Integer> steps = new HashMap<>();
     Map<Integer, String> told = new HashMap<>();
-    for (FillingStep step : FillingOrder.of(ring.design(), remanences, filled).steps()) {
+    for (FillingStep step : FillingOrder.of(forces, remanences, filled).steps()) {
       steps.put(step.slot(), step.step());
       String remark = words.of(ring.design().layout(), step);
       if (!remark.isEmpty()) {
