@@ -38,6 +38,28 @@ class FillingOrderTest {
     }
   }
 
+  /// Source: the same independent figures, about 1 N along the axis. In place the magnets lie in
+  /// line and there is none; on its way in one that faces out is drawn in by 0.8 N at most, one
+  /// that lies along the ring is pushed out by 0.45 N at most.
+  @Test
+  void onItsWayInTheLastMagnetOfTwelveFeelsSomeTenthsOfANewtonAlongTheAxis() {
+    UnitForces forces = new UnitForces(design(InsertFrom.FACE));
+    double[][] greatest = new double[2][2];
+    for (int slot = 1; slot <= 2; slot++) {
+      for (int i = 0; i < UnitForces.DRAWN_OUT.length; i++) {
+        double axial = 0;
+        for (int other = 1; other <= 12; other++) {
+          axial += other == slot ? 0 : 1.3 * 1.3 * forces.on(slot, other)[i].z();
+        }
+        greatest[slot - 1][0] = Math.min(greatest[slot - 1][0], axial);
+        greatest[slot - 1][1] = Math.max(greatest[slot - 1][1], axial);
+      }
+    }
+    assertEquals(-0.8, greatest[0][0], 0.1);
+    assertEquals(0, greatest[0][1], 0.01);
+    assertEquals(0.44, greatest[1][1], 0.1);
+  }
+
   /// Against dipoles: each block is 6 × 6 × 15 of them, and a force is the change of energy with
   /// place. Neighbours touch nearly, so the sum is right to some per cent only.
   @Test

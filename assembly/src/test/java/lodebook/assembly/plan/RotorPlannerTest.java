@@ -17,7 +17,9 @@ import java.util.Set;
 import java.util.stream.Stream;
 import lodebook.assembly.layout.Facing;
 import lodebook.assembly.layout.Focus;
+import lodebook.assembly.layout.InsertFrom;
 import lodebook.assembly.layout.Layout;
+import lodebook.assembly.layout.Numbering;
 import lodebook.assembly.magnet.Strength;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -104,6 +106,55 @@ class RotorPlannerTest {
         assertTrue(used.add(piece.piece()), context);
       }
     }
+  }
+
+  /// f_i = f_1 ± (i − 1)·360°/k, plus with focus in, minus with focus out, whatever the numbering.
+  @ParameterizedTest
+  @ValueSource(ints = {2, 3, 4, 5, 6, 8})
+  void everyFacingIsByTheRule(int k) {
+    for (Focus focus : Focus.values()) {
+      for (Numbering numbering : Numbering.values()) {
+        for (double first : new double[] {0, 90, 180}) {
+          Layout layout = numbered(Examples.layout(2, k, focus, null), numbering, first);
+          RotorTask task = RotorTask.of(layout, Examples.lot("L", "MAIN", 2 * k + 2, 1.3, k));
+          RotorPlan plan =
+              RotorPlanner.of(Examples.design(layout), task)
+                  .plan(1, new Effort(1000, () -> true, ratio -> {}));
+          for (Placement each : plan.placements()) {
+            double sense = focus == Focus.IN ? 1 : -1;
+            double facing = first + sense * (each.slot() - 1) * 360.0 / k;
+            assertEquals(
+                0,
+                Math.IEEEremainder(facing - each.facing().degrees(), 360),
+                1e-9,
+                () -> layout + ": " + each);
+          }
+        }
+      }
+    }
+  }
+
+  private static Layout numbered(Layout plain, Numbering numbering, double firstFacing) {
+    return new Layout(
+        plain.code(),
+        plain.revision(),
+        plain.polePairs(),
+        plain.segmentsPerPolePair(),
+        plain.focus(),
+        numbering,
+        30,
+        new Facing(firstFacing),
+        plain.slotRadiusMetres(),
+        plain.magnetType(),
+        plain.sideMagnetType(),
+        plain.workingRadiusMetres(),
+        plain.probe(),
+        plain.spread(),
+        "",
+        null,
+        false,
+        InsertFrom.FACE,
+        0.03);
   }
 
   @Test

@@ -209,6 +209,7 @@ final class TravellerSheetTest {
     assertTrue(text.contains("any of L-9"));
     assertTrue(text.contains("hold it"));
     assertTrue(text.contains("Steps in the order of filling"));
+    assertTrue(text.contains("Order of filling: every second slot, then those between."), text);
     assertTrue(text.contains("Readings of the finished ring"));
     assertTrue(text.contains("\u2212454 ±"), text);
   }

@@ -42,7 +42,9 @@ final class PaperTraveller extends Verb {
                 rotors.stream()
                     .map(rotor -> Travellers.read(book, rotor, session.facts(book)))
                     .toList());
-    OutputFile.write(file, TravellerSheet.pdf(materials.stream().map(m -> Travellers.of(m, planned(m))).toList()));
+    OutputFile.write(
+        file,
+        TravellerSheet.pdf(materials.stream().map(m -> Travellers.of(m, planned(m))).toList()));
     List<String> shown = materials.stream().map(m -> m.shown().rotor().code()).toList();
     session.done("traveller.written", String.join(", ", shown), file, shown.size());
     session.next("lodebook place " + shown.getFirst() + " placements.csv");

@@ -31,9 +31,10 @@ import picocli.CommandLine.Parameters;
     description = "Plan which piece goes into which slot, which way and in which order.",
     footer = {
       "",
-      "Examples:",
+      "Example:",
       "  lodebook plan R-0001 --from L-2404",
-      "  lodebook plan --batch B-31 --from L-1,L-2,L-3 --apart L-1,L-3 --keep-for R-7=L-1/0017"
+      "  lodebook plan --batch B-31 --from L-1,L-2,L-3 --apart L-1,L-3 --compare",
+      "  lodebook plan R-7 --from L-1 --keep-for R-7=L-1/0017,L-1/0018"
     })
 final class PlanCommand extends Verb {
   @Parameters(arity = "0..*", paramLabel = "ROTOR", description = "open rotors")
