@@ -184,7 +184,7 @@ class PlanCommandTest {
             4,
             "",
             """
-            lodebook: magnets of type BLK are short by 10: 24 are needed, 14 may be used
+            lodebook: 10 magnets of type BLK too few: 24 are needed, 14 may be used
             try: lodebook lot list
             """),
         shop.run("plan", "R-1", "R-2", "--from", "L-1"));
