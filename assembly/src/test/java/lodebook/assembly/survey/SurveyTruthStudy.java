@@ -18,8 +18,8 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /// The tables of docs/truth.md, written line by line to `target/truth.md`. Trials per line:
-/// `-Dtrials=1000`; rings whose names contain a text only: `-Dring=12`; seeds are 100000 and up,
-/// one per trial.
+/// `-Dtrials=1000`; rings whose names contain a text only: `-Dring=12`; lines whose names contain a
+/// text only: `-Dline=start`; seeds are 100000 and up, one per trial.
 @Tag("slow")
 class SurveyTruthStudy {
   private static final long SEED = 100_000;
@@ -29,15 +29,18 @@ class SurveyTruthStudy {
 
   @Test
   void tables() throws IOException {
-    tables(Integer.getInteger("trials", 1000), System.getProperty("ring", ""));
+    tables(
+        Integer.getInteger("trials", 1000),
+        System.getProperty("ring", ""),
+        System.getProperty("line", ""));
   }
 
-  /// The same without a test: number of trials, text in the ring's name.
+  /// The same without a test: number of trials, text in the ring's name, text in the line's.
   public static void main(String[] arguments) throws IOException {
-    new SurveyTruthStudy().tables(Integer.parseInt(arguments[0]), arguments[1]);
+    new SurveyTruthStudy().tables(Integer.parseInt(arguments[0]), arguments[1], arguments[2]);
   }
 
-  private void tables(int trials, String only) throws IOException {
+  private void tables(int trials, String only, String lines) throws IOException {
     for (var ring : rings().entrySet()) {
       if (ring.getKey().contains(only)) {
         boolean wrongModels = ring.getKey().startsWith("wrong models");
@@ -45,7 +48,9 @@ class SurveyTruthStudy {
         say("| survey | right | cannot tell | asked to look | weak, drowned | wrong | by signs |");
         say("| --- | --- | --- | --- | --- | --- | --- |");
         for (var line : ring.getValue().entrySet()) {
-          line(trials, line, wrongModels);
+          if (line.getKey().contains(lines)) {
+            line(trials, line, wrongModels);
+          }
         }
       }
     }
