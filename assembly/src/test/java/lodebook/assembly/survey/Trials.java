@@ -225,4 +225,20 @@ final class Trials {
           Measuring.AS_SET);
     };
   }
+
+  /// Surveys of a whole ring with given faults in given slots.
+  static BiFunction<SplittableRandom, Integer, Trial> inSlots(
+      RingDesign design, List<Fault> faults) {
+    MutualMagnetisation mutual = MutualMagnetisation.of(design);
+    return (random, i) -> {
+      RingTruth truth = new RingTruth(design, mutual, design.slots(), faults, random);
+      double gain = METER.accuracy() * random.nextGaussian();
+      return new Trial(
+          truth.recorded(),
+          truth.read(design.slots(), METER, gain, 0),
+          faults,
+          words(faults),
+          Measuring.AS_SET);
+    };
+  }
 }
