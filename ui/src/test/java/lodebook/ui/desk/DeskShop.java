@@ -125,13 +125,18 @@ public final class DeskShop {
     lodebook.ui.desk.bench.BenchGauge.build(station(Locale.ENGLISH, "TB"), rotor);
     String rows =
         lodebook.ui.desk.bench.BenchGauge.round(station(Locale.ENGLISH, "TB"), rotor, reversed);
+    does("survey", "import", rotor, file("round.csv", rows).toString(), "--meter", "GM-1");
+    does("survey", "check", rotor);
+  }
+
+  /// Writes a file.
+  public Path file(String name, String text) {
     try {
-      write(folder.resolve("round.csv"), rows);
+      write(folder.resolve(name), text);
     } catch (IOException failed) {
       throw new UncheckedIOException(failed);
     }
-    does("survey", "import", rotor, folder.resolve("round.csv").toString(), "--meter", "GM-1");
-    does("survey", "check", rotor);
+    return folder.resolve(name);
   }
 
   /// Runs a command on the shop's book; it must succeed.
@@ -179,9 +184,11 @@ public final class DeskShop {
       Files.move(folder.resolve("demo/book"), folder.resolve("book"));
       write(
           folder.resolve("lots.csv"),
-          "lot,type,supplier,received,count,certificate,certificate_br_mT,location\n"
-              + "L-2501,BLK-4-4-10,Ostmagnet,2026-11-20,60,Z-881,1300,shelf 2\n"
-              + "L-2502,BLK-5-5-10,Ostmagnet,2026-11-27,200,Z-902,1300,shelf 3\n");
+          """
+          lot,type,supplier,received,count,certificate,certificate_br_mT,location
+          L-2501,BLK-4-4-10,Ostmagnet,2026-11-20,60,Z-881,1300,shelf 2
+          L-2502,BLK-5-5-10,Ostmagnet,2026-11-27,200,Z-902,1300,shelf 3
+          """);
       does(folder, clock, "lot", "import", folder.resolve("lots.csv").toString());
       write(folder.resolve("pieces.csv"), pieces(60));
       does(folder, clock, "piece", "import", "L-2501", folder.resolve("pieces.csv").toString());
@@ -209,7 +216,7 @@ public final class DeskShop {
               i <= 30 ? "C" : "D",
               (char) ('A' + (i - 1) % 30 / 6),
               (i - 1) % 6 + 1,
-              172 * (1 + 0.012 * random.nextGaussian())));
+              261 * (1 + 0.012 * random.nextGaussian())));
     }
     return String.join("\n", rows) + "\n";
   }

@@ -8,6 +8,7 @@ import javafx.scene.input.KeyEvent;
 import lodebook.ui.desk.Screens.Open;
 import lodebook.ui.desk.Screens.View;
 import lodebook.ui.desk.bench.BenchGauge;
+import lodebook.ui.desk.room.FileDrop;
 
 /// The states of which pictures are taken.
 final class ScreenStates {
@@ -20,14 +21,63 @@ final class ScreenStates {
     trace(screens, start);
     history(screens, start);
     survey(screens, start);
+    stock(screens, start);
+    shop(screens, start);
   }
+
+  private static void shop(Screens screens, String start) {
+    if (!"shop".startsWith(start)) {
+      return;
+    }
+    screens.take("shop", Locale.ENGLISH, View.FEW, open -> open.window().open("shop", null));
+    screens.take("shop-de", Locale.GERMAN, View.FEW, open -> open.window().open("shop", null));
+    screens.takeEmpty("first-start", Locale.ENGLISH, View.FEW, open -> open.window().begin());
+    screens.take(
+        "contrast-bench",
+        Locale.ENGLISH,
+        java.util.List.of(View.CONTRAST),
+        open -> {
+          open.window().open("bench", "R-9");
+          steps(open, 3);
+        });
+  }
+
+  private static void stock(Screens screens, String start) {
+    if (!"stock".startsWith(start)) {
+      return;
+    }
+    screens.take("stock-lots", Locale.ENGLISH, View.FEW, open -> open.window().open("stock", null));
+    screens.take(
+        "stock-lot", Locale.ENGLISH, View.MOST, open -> open.window().open("stock", "L-2501"));
+    screens.take(
+        "stock-tray", Locale.ENGLISH, View.FEW, open -> open.window().open("stock", "TR-C"));
+    screens.take(
+        "stock-piece", Locale.GERMAN, View.FEW, open -> open.window().open("stock", "L-2501/0007"));
+    screens.take(
+        "stock-bad-file",
+        Locale.ENGLISH,
+        View.FEW,
+        open -> {
+          open.window().open("stock", "L-2502");
+          open.settle();
+          FileDrop.drop(open.find("#stock"), open.shop().file("readings.csv", BAD_READINGS));
+        });
+  }
+
+  private static final String BAD_READINGS =
+      """
+      piece,tray,cell,value,unit,standoff_mm,temperature_C
+      1,TR-E,A1,171.2,mT,1.5,20
+      2,TR-E,A2,-170.0,mT,1.5,20
+      3,TR-E,A1,169.4,mT,1.5,20
+      4,TR-E,A4,169.9,mTesla,1.5,20
+      """;
 
   private static void waiting(Screens screens, String start) {
     if (!"waiting".startsWith(start)) {
       return;
     }
-    screens.take(
-        "waiting", Locale.ENGLISH, View.MOST, open -> open.window().open("waiting", null));
+    screens.take("waiting", Locale.ENGLISH, View.MOST, open -> open.window().open("waiting", null));
     screens.take(
         "waiting-de", Locale.GERMAN, View.FEW, open -> open.window().open("waiting", null));
   }
@@ -48,8 +98,7 @@ final class ScreenStates {
     if (!"history".startsWith(start)) {
       return;
     }
-    screens.take(
-        "history", Locale.ENGLISH, View.MOST, open -> open.window().open("history", null));
+    screens.take("history", Locale.ENGLISH, View.MOST, open -> open.window().open("history", null));
     screens.take(
         "history-checked",
         Locale.GERMAN,

@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.ZoneOffset;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Consumer;
@@ -18,10 +19,12 @@ import javafx.scene.image.WritableImage;
 import javafx.scene.transform.Transform;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
+import lodebook.db.book.BookAddress;
 import lodebook.ui.desk.look.Look;
 import lodebook.ui.desk.look.Theme;
 import lodebook.ui.desk.station.Station;
 import lodebook.ui.desk.window.DeskWindow;
+import lodebook.ui.desk.words.DeskWords;
 
 /// Pictures of the rooms in the states that matter.
 final class Screens {
@@ -78,9 +81,25 @@ final class Screens {
   /// Takes one state in several views.
   void take(String name, Locale language, List<View> views, Consumer<Open> bringIt) {
     DeskShop shop = DeskShop.in(work.resolve("shop-" + shops++));
+    take(name, shop, shop.station(language, "TB"), views, bringIt);
+  }
+
+  /// Takes one state of a window whose book is not there yet.
+  void takeEmpty(String name, Locale language, List<View> views, Consumer<Open> bringIt) {
+    DeskShop shop = DeskShop.in(work.resolve("shop-" + shops++));
+    Station station =
+        new Station(
+            new BookAddress.Folder(work.resolve("none").resolve("book")),
+            "BENCH-1",
+            shop.time(),
+            new DeskWords(language, ZoneOffset.UTC));
+    take(name, shop, station, views, bringIt);
+  }
+
+  private void take(
+      String name, DeskShop shop, Station station, List<View> views, Consumer<Open> bringIt) {
     Fx.run(
         () -> {
-          Station station = shop.station(language, "TB");
           SimpleObjectProperty<Look> look = new SimpleObjectProperty<>(new Look(Theme.LIGHT));
           DeskWindow window = new DeskWindow(station, shop.runner(station), look);
           Stage stage = new Stage();

@@ -79,7 +79,12 @@ public final class Station {
 
   /// Opens the book; close it soon.
   public Book open() {
-    return Book.open(address, new Visit(name, "desktop", clock));
+    return Book.open(address, visit());
+  }
+
+  /// Who opens the book, and from where.
+  public Visit visit() {
+    return new Visit(name, "desktop", clock);
   }
 
   /// Asks the book something, or does something to it.

@@ -67,10 +67,7 @@ public record Round(
     Map<ProbePoint, Double> read = new HashMap<>();
     readings.forEach(r -> read.put(r.reading().point(), r.reading().fluxTesla()));
     return expected.stream()
-        .map(
-            e ->
-                new ShownReading(
-                    e.point(), e.valueTesla(), e.bandTesla(), read.get(e.point())))
+        .map(e -> new ShownReading(e.point(), e.valueTesla(), e.bandTesla(), read.get(e.point())))
         .toList();
   }
 

@@ -38,7 +38,8 @@ import lodebook.ui.files.Rows;
 import lodebook.ui.files.SurveyFile;
 import org.jspecify.annotations.Nullable;
 
-/// What the room for surveys does to the book; slow enough to be done away from the screen's thread.
+/// What the room for surveys does to the book; slow enough to be done away from the screen's
+/// thread.
 final class SurveyBook {
   private final Station station;
 
@@ -126,8 +127,7 @@ final class SurveyBook {
                   k.slot(),
                   new PlacedMagnet(k.strength(), grade == null ? 0 : grade.remanencePerKelvin()));
             });
-    return new ExpectedReadings(
-            new SurveyedRing(rotor.design(), magnets), new Meter("", 0.01, 0))
+    return new ExpectedReadings(new SurveyedRing(rotor.design(), magnets), new Meter("", 0.01, 0))
         .all();
   }
 
@@ -193,8 +193,7 @@ final class SurveyBook {
     if (survey == null || round.readings().isEmpty()) {
       return round;
     }
-    return round.judged(
-        new SurveyChecks(station::open).check(List.of(survey.code())).diagnosis());
+    return round.judged(new SurveyChecks(station::open).check(List.of(survey.code())).diagnosis());
   }
 
   /// Records that the magnet of a finding was taken out and put right.
@@ -221,8 +220,7 @@ final class SurveyBook {
   Round voided(Round round, String why) {
     Survey survey = round.survey();
     if (survey != null) {
-      station.change(
-          book -> new Surveys(book).declareVoid(station.act(), survey.code(), why));
+      station.change(book -> new Surveys(book).declareVoid(station.act(), survey.code(), why));
     }
     return open(round.code());
   }
@@ -233,8 +231,7 @@ final class SurveyBook {
     if (survey == null) {
       return round;
     }
-    station.change(
-        book -> new Surveys(book).move(station.act(), survey.code(), rotor, why));
+    station.change(book -> new Surveys(book).move(station.act(), survey.code(), rotor, why));
     return judge(open(survey.code()));
   }
 }

@@ -34,7 +34,6 @@ import org.jspecify.annotations.Nullable;
 
 /// A round of readings: taken one by one or from a file, judged, explained.
 public final class SurveyModel {
-  private final Station station;
   private final Runner runner;
   private final DeskWords words;
   private final SurveyBook book;
@@ -52,7 +51,6 @@ public final class SurveyModel {
   /// @param station whose book it is
   /// @param runner does what takes time
   public SurveyModel(Station station, Runner runner) {
-    this.station = station;
     this.runner = runner;
     this.words = station.words();
     this.book = new SurveyBook(station);
@@ -179,8 +177,7 @@ public final class SurveyModel {
     }
     FluxUnit stated = unit.get();
     double amount = number.getAsDouble();
-    if (Math.abs(stated.tesla(amount)) > TypedNumber.MOST_TESLA
-        && !typed.get().equals(askedBack)) {
+    if (Math.abs(stated.tesla(amount)) > TypedNumber.MOST_TESLA && !typed.get().equals(askedBack)) {
       askedBack = typed.get();
       said.set(
           Said.of(Said.Tone.OPEN, say("bench.impossible", typed.get().strip(), stated.word())));
@@ -262,9 +259,7 @@ public final class SurveyModel {
       rows.add(sentences.finding(finding, now.rotor().design().layout()));
     }
     if (diagnosis.verdict() == Verdict.FAULT) {
-      rows.add(
-          sentences.remedy(
-              diagnosis.findings().getFirst(), now.rotor().design().layout()));
+      rows.add(sentences.remedy(diagnosis.findings().getFirst(), now.rotor().design().layout()));
     }
     rows.addAll(sentences.beside(diagnosis));
     for (MeasureNext next : diagnosis.measureNext().stream().limit(2).toList()) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import lodebook.assembly.layout.Facing;
 import lodebook.assembly.survey.Diagnosis;
 import lodebook.assembly.survey.FaultKind;
 import lodebook.assembly.survey.Finding;
@@ -46,10 +47,13 @@ final class SurveyPictures {
   }
 
   private DrawnSlot drawn(Finding finding, @org.jspecify.annotations.Nullable DrawnSlot before) {
-    boolean gone = finding.kind() == FaultKind.MISSING || before == null;
+    Facing stands = before == null ? null : before.facing();
+    if (finding.faces() != null) {
+      stands = finding.faces();
+    }
     return new DrawnSlot(
         finding.slot(),
-        gone ? null : finding.faces() == null ? before.facing() : finding.faces(),
+        finding.kind() == FaultKind.MISSING ? null : stands,
         null,
         new SurveySentences(words).mark(finding.kind()));
   }

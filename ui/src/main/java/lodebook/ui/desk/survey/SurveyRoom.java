@@ -1,6 +1,5 @@
 package lodebook.ui.desk.survey;
 
-import java.io.File;
 import java.util.List;
 import javafx.beans.property.ObjectProperty;
 import javafx.geometry.Insets;
@@ -10,8 +9,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
-import javafx.scene.input.DragEvent;
-import javafx.scene.input.TransferMode;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
@@ -22,12 +19,14 @@ import javafx.scene.layout.VBox;
 import lodebook.assembly.layout.ProbePoint;
 import lodebook.assembly.survey.Diagnosis;
 import lodebook.assembly.survey.FaultKind;
+import lodebook.assembly.survey.Finding;
 import lodebook.db.builds.RecordedPlacement;
 import lodebook.db.surveys.FluxUnit;
 import lodebook.db.surveys.Survey;
 import lodebook.reports.ring.ShownReading;
 import lodebook.ui.desk.look.Look;
 import lodebook.ui.desk.ring.RingControl;
+import lodebook.ui.desk.room.FileDrop;
 import lodebook.ui.desk.room.Keys;
 import lodebook.ui.desk.room.Question;
 import lodebook.ui.desk.room.Room;
@@ -81,8 +80,7 @@ public final class SurveyRoom implements Room {
                 });
     ring.whenTouched(this::touched);
     ring.tellsOf(this::story);
-    ground.setOnDragOver(this::over);
-    ground.setOnDragDropped(this::dropped);
+    FileDrop.onto(ground, model::file);
   }
 
   @Override
@@ -231,13 +229,13 @@ public final class SurveyRoom implements Room {
     FlowPane keys = new FlowPane(10, 8);
     keys.setAlignment(Pos.CENTER);
     Diagnosis diagnosis = round.diagnosis();
-    boolean turnable =
-        diagnosis != null
-            && !diagnosis.findings().isEmpty()
-            && turnable(diagnosis.findings().getFirst().kind());
-    if (turnable) {
-      int slot = diagnosis.findings().getFirst().slot();
-      add(keys, words.say("survey.reworked", words.number(slot)), model::reworked, "call");
+    Finding first =
+        diagnosis == null || diagnosis.findings().isEmpty()
+            ? null
+            : diagnosis.findings().getFirst();
+    if (first != null && turnable(first.kind())) {
+      String slot = words.number(first.slot());
+      add(keys, words.say("survey.reworked", slot), model::reworked, "call");
     }
     if (point == null) {
       boolean more = diagnosis != null && !diagnosis.measureNext().isEmpty();
@@ -329,22 +327,6 @@ public final class SurveyRoom implements Room {
               read == null ? "" : words.milliTesla(read)));
     }
     return told.toString();
-  }
-
-  private void over(DragEvent event) {
-    if (event.getDragboard().hasFiles() && model.round().get() != null) {
-      event.acceptTransferModes(TransferMode.COPY);
-    }
-    event.consume();
-  }
-
-  private void dropped(DragEvent event) {
-    List<File> files = event.getDragboard().getFiles();
-    if (!files.isEmpty()) {
-      model.file(files.getFirst().toPath());
-    }
-    event.setDropCompleted(!files.isEmpty());
-    event.consume();
   }
 
   private void nextUnit() {

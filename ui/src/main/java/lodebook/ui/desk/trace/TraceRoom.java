@@ -7,6 +7,7 @@ import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
+import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.TreeCell;
 import javafx.scene.control.TreeItem;
@@ -14,6 +15,7 @@ import javafx.scene.control.TreeView;
 import javafx.scene.input.KeyCode;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import lodebook.db.trace.TraceNode;
 import lodebook.ui.desk.look.Look;
@@ -90,8 +92,12 @@ public final class TraceRoom implements Room {
           }
         });
     tree.setAccessibleText(words.say(key));
-    VBox.setVgrow(tree, Priority.ALWAYS);
-    VBox side = new VBox(4, Keys.words(words.say(key), "heading"), tree);
+    Label none = Keys.words(words.say("trace.nothing"), "quiet");
+    none.visibleProperty().bind(tree.visibleProperty().not());
+    StackPane either = new StackPane(tree, none);
+    StackPane.setAlignment(none, Pos.TOP_LEFT);
+    VBox.setVgrow(either, Priority.ALWAYS);
+    VBox side = new VBox(4, Keys.words(words.say(key), "heading"), either);
     HBox.setHgrow(side, Priority.ALWAYS);
     side.setPrefWidth(380);
     return side;
@@ -146,6 +152,8 @@ public final class TraceRoom implements Room {
     }
     madeFrom.setRoot(root(traced.trace().madeFrom()));
     wentInto.setRoot(root(traced.trace().wentInto()));
+    madeFrom.setVisible(!traced.trace().madeFrom().isEmpty());
+    wentInto.setVisible(!traced.trace().wentInto().isEmpty());
     thing.getChildren().clear();
     thing.getChildren().add(Keys.words(traced.trace().code(), "title"));
     String kind = kind(traced.trace().kind()) + state(traced.trace().state());

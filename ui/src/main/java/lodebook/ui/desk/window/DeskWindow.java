@@ -62,6 +62,7 @@ public final class DeskWindow {
   private final Timeline looking = new Timeline(new KeyFrame(LOOK_EVERY, _ -> lookForChanges()));
   private @Nullable Room here;
   private boolean waiting;
+  private boolean looked;
 
   /// @param station the station
   /// @param runner does what takes time
@@ -91,6 +92,14 @@ public final class DeskWindow {
 
   /// Opens the first room, asks who is here, and begins to look for others' changes.
   public void begin() {
+    if (FirstStart.needed(station.address())) {
+      middle.getChildren().setAll(new FirstStart(station, runner).page(this::bookIsThere));
+      return;
+    }
+    bookIsThere();
+  }
+
+  private void bookIsThere() {
     open(rooms.keySet().iterator().next(), null);
     if (station.who().get() == null) {
       askWho();
@@ -257,6 +266,7 @@ public final class DeskWindow {
         watch::changed,
         changed -> {
           waiting = false;
+          looked = true;
           if (changed && here != null) {
             here.refresh();
           }
@@ -265,5 +275,10 @@ public final class DeskWindow {
           waiting = false;
           tell(trouble);
         });
+  }
+
+  /// Whether the book was looked at since the window opened, so that changes are seen from now on.
+  boolean looked() {
+    return looked;
   }
 }

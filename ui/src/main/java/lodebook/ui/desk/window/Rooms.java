@@ -10,7 +10,11 @@ import lodebook.ui.desk.look.Look;
 import lodebook.ui.desk.room.Doors;
 import lodebook.ui.desk.room.Room;
 import lodebook.ui.desk.run.Runner;
+import lodebook.ui.desk.shop.ShopModel;
+import lodebook.ui.desk.shop.ShopRoom;
 import lodebook.ui.desk.station.Station;
+import lodebook.ui.desk.stock.StockModel;
+import lodebook.ui.desk.stock.StockRoom;
 import lodebook.ui.desk.survey.SurveyModel;
 import lodebook.ui.desk.survey.SurveyRoom;
 import lodebook.ui.desk.trace.TraceModel;
@@ -27,9 +31,11 @@ final class Rooms {
     DeskWords words = station.words();
     return List.of(
         new WaitingRoom(new WaitingModel(station, runner), words, doors),
+        new StockRoom(new StockModel(station, runner), look, doors),
         new BenchRoom(new BenchModel(station, runner), look, doors),
         new SurveyRoom(new SurveyModel(station, runner), look),
         new TraceRoom(new TraceModel(station, runner), words, look, doors),
-        new HistoryRoom(new HistoryModel(station, runner), words));
+        new HistoryRoom(new HistoryModel(station, runner), words),
+        new ShopRoom(new ShopModel(station, runner)));
   }
 }
