@@ -129,6 +129,27 @@ public final class DeskShop {
     does("survey", "check", rotor);
   }
 
+  /// Plans a ring of 48 slots, read in both components.
+  public void ringOf48(String rotor) {
+    String layout =
+        """
+        {
+          "layout": "WIDE-48", "revision": "A", "polePairs": 12, "segmentsPerPolePair": 4,
+          "focus": "out", "numbering": "clockwise", "firstSlotClockDegrees": 0,
+          "firstFacingDegrees": 0, "slotRadiusMillimetres": 40.0, "magnetType": "BLK-4-4-10",
+          "sideMagnetType": null, "workingRadiusMillimetres": 43.0,
+          "probe": { "radiusMillimetres": 43.0, "heightMillimetres": 0.0,
+                     "spots": ["centre"], "components": ["radial", "tangential"] },
+          "spread": {}, "adhesive": "two-part epoxy", "bodyTurns": false
+        }
+        """;
+    does("layout", "import", file("wide.json", layout).toString());
+    does("layout", "release", "WIDE-48");
+    does("plan", "--drop", "R-9", "R-10");
+    does("rotor", "open", "WIDE-48", "--serial", rotor);
+    does("plan", rotor, "--from", "L-2501", "--seconds", "1");
+  }
+
   /// Writes a file.
   public Path file(String name, String text) {
     try {

@@ -12,7 +12,13 @@ public sealed interface BenchLoad {
   record Full(RotorShown rotor) implements BenchLoad {}
 
   /// There is no plan.
-  record Unplanned(RotorShown rotor) implements BenchLoad {}
+  ///
+  /// @param lots accepted lots of its magnet types, from which it can be planned
+  record Unplanned(RotorShown rotor, List<String> lots) implements BenchLoad {
+    public Unplanned {
+      lots = List.copyOf(lots);
+    }
+  }
 
   /// The plan lost pieces; it must be planned anew.
   ///

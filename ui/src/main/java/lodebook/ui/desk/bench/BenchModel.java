@@ -263,10 +263,13 @@ public final class BenchModel {
     withStep(now -> go(() -> bench.usedAnother(now, where, say("why.another"))));
   }
 
-  /// Plans the empty slots anew, after the plan lost pieces.
+  /// Plans the empty slots, from the lots that were named.
   public void planAnew() {
     List<String> lots = lotsToPlan;
     String code = rotor;
+    if (lots.isEmpty()) {
+      return;
+    }
     go(() -> bench.planAnew(code, lots));
   }
 
@@ -338,8 +341,15 @@ public final class BenchModel {
       case BenchLoad.Unplanned unplanned -> {
         rotor = unplanned.rotor().rotor().code();
         step.set(null);
+        lotsToPlan = unplanned.lots();
         phase.set(BenchPhase.UNPLANNED);
-        said.set(Said.of(Said.Tone.OPEN, say("bench.unplanned", rotor)));
+        String lots = String.join(", ", lotsToPlan);
+        said.set(
+            Said.of(
+                Said.Tone.OPEN,
+                lots.isEmpty()
+                    ? say("bench.unplanned.no-lot", rotor)
+                    : say("bench.unplanned", rotor, lots)));
       }
       case BenchLoad.Spoilt spoilt -> {
         rotor = spoilt.rotor().rotor().code();

@@ -341,7 +341,8 @@ public final class BenchRoom implements Room {
               .add("call");
       case SPOILT ->
           key(KeyCode.F9, "bench.plan-anew", model::planAnew).getStyleClass().add("call");
-      default -> {}
+      case UNPLANNED -> key(KeyCode.F9, "bench.plan", model::planAnew).getStyleClass().add("call");
+      case CHOOSE, STEP, DOUBT -> {}
     }
     key(KeyCode.F8, "bench.pause", model::offer);
   }

@@ -27,6 +27,9 @@ import lodebook.db.builds.RecordedPlacement;
 import lodebook.db.builds.RotorShown;
 import lodebook.db.builds.Rotors;
 import lodebook.db.stock.Grades;
+import lodebook.db.stock.Lot;
+import lodebook.db.stock.LotState;
+import lodebook.db.stock.Lots;
 import lodebook.db.surveys.RecordedReading;
 import lodebook.db.surveys.Survey;
 import lodebook.db.surveys.Surveys;
@@ -81,7 +84,23 @@ final class StepLoader {
     }
     return found.rotor.rotor().filled() == found.rotor.rotor().slots()
         ? new BenchLoad.Full(found.rotor)
-        : new BenchLoad.Unplanned(found.rotor);
+        : new BenchLoad.Unplanned(found.rotor, lotsFor(found.rotor));
+  }
+
+  /// Accepted lots of a rotor's magnet types that have pieces left.
+  private List<String> lotsFor(RotorShown rotor) {
+    Set<String> types = new HashSet<>();
+    for (int slot = 1; slot <= rotor.design().slots(); slot++) {
+      types.add(rotor.design().typeAt(slot).code());
+    }
+    return station.with(
+        book ->
+            new Lots(book)
+                .list().stream()
+                    .filter(l -> l.state() == LotState.ACCEPTED && l.left() > 0)
+                    .filter(l -> types.contains(l.received().type()))
+                    .map(Lot::code)
+                    .toList());
   }
 
   private static Found read(Book book, String code) {

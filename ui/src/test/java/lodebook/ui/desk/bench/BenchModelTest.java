@@ -199,4 +199,17 @@ class BenchModelTest {
     assertEquals(
         "R-9 is full. Now the round: read every slot once more.", bench.said().get().sentence());
   }
+
+  @Test
+  void anUnplannedRotorIsPlannedAtTheBenchByWhoMay() {
+    station.takenBy(shop.station(Locale.ENGLISH, "MK").who().get());
+    bench.sitDown("R-11");
+    assertEquals(BenchPhase.UNPLANNED, bench.phase().get());
+    assertEquals(
+        "R-11 has no plan yet. It can be planned from L-2404, L-2501.",
+        bench.said().get().sentence());
+    bench.planAnew();
+    assertEquals("R-11", step().code());
+    assertEquals(1, step().step());
+  }
 }
