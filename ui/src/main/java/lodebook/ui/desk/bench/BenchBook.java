@@ -123,14 +123,16 @@ final class BenchBook {
       survey = taken.code();
       recorded = new Surveys(book).asRecorded(List.of(survey));
     }
-    return judge(step, unit.tesla(amount), recorded, step.afterReading(survey));
+    return judge(step, unit.tesla(amount), recorded, survey);
   }
 
-  private Outcome judge(BenchStep step, double tesla, RecordedSurvey recorded, BenchStep after) {
+  private Outcome judge(BenchStep step, double tesla, RecordedSurvey recorded, String survey) {
     ExpectedReading expected = step.expected().getFirst();
-    boolean near = Math.abs(tesla - expected.valueTesla()) <= DOUBTFUL_BANDS * expected.bandTesla();
-    boolean tells = Math.abs(expected.valueTesla()) > 2 * DOUBTFUL_BANDS * expected.bandTesla();
-    if (near && (tells || !after.toRead().isEmpty())) {
+    double doubtful = DOUBTFUL_BANDS * expected.bandTesla();
+    boolean near = Math.abs(tesla - expected.valueTesla()) <= doubtful;
+    boolean tells = near && Math.abs(expected.valueTesla()) > 2 * doubtful;
+    BenchStep after = step.afterReading(survey, tells);
+    if (near && (after.told() || !after.toRead().isEmpty())) {
       return new Outcome(Outcome.Kind.RIGHT, after, null);
     }
     Diagnosis diagnosis = explain(recorded);

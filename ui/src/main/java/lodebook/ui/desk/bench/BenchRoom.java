@@ -349,7 +349,7 @@ public final class BenchRoom implements Room {
 
   private Button key(KeyCode code, String text, Runnable action) {
     Button key = Keys.key(code.getName() + "  " + words.say(text), action);
-    key.setId(text);
+    key.setId(text.replace('.', '-'));
     key.disableProperty().bind(model.busy());
     byKey.put(code, key);
     keys.getChildren().add(key);

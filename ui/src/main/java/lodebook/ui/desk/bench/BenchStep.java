@@ -27,6 +27,7 @@ import org.jspecify.annotations.Nullable;
 /// @param expected what they should read once it is in
 /// @param survey the survey to which readings belong, or null before the first
 /// @param standing the magnets in the ring with this one in
+/// @param told whether one of its readings showed which way it faces
 public record BenchStep(
     RotorShown rotor,
     int slot,
@@ -42,7 +43,8 @@ public record BenchStep(
     List<ProbePoint> toRead,
     List<ExpectedReading> expected,
     @Nullable String survey,
-    Map<Integer, PlacedMagnet> standing) {
+    Map<Integer, PlacedMagnet> standing,
+    boolean told) {
   public BenchStep {
     toRead = List.copyOf(toRead);
     expected = List.copyOf(expected);
@@ -60,7 +62,7 @@ public record BenchStep(
   }
 
   /// The step after one of its readings was taken.
-  BenchStep afterReading(String surveyCode) {
+  BenchStep afterReading(String surveyCode, boolean tells) {
     return new BenchStep(
         rotor,
         slot,
@@ -76,13 +78,14 @@ public record BenchStep(
         toRead.subList(1, toRead.size()),
         expected.subList(1, expected.size()),
         surveyCode,
-        standing);
+        standing,
+        told || tells);
   }
 
   /// The same step with all its readings to be taken once more.
   BenchStep readAgain(List<ProbePoint> points, List<ExpectedReading> readings) {
     return new BenchStep(
         rotor, slot, step, of, magnet, lot, tray, cell, facing, warning, placed, points, readings,
-        survey, standing);
+        survey, standing, false);
   }
 }

@@ -164,7 +164,8 @@ final class StepLoader {
         missing,
         expected(found, standing, missing),
         found.survey,
-        standing);
+        standing,
+        false);
   }
 
   private static BenchStep step(Found found, PlannedSlot next) {
@@ -186,7 +187,8 @@ final class StepLoader {
         points,
         expected(found, standing, points),
         found.survey,
-        standing);
+        standing,
+        false);
   }
 
   private static Map<Integer, PlacedMagnet> standing(Found found) {

@@ -101,7 +101,7 @@ class DeskWindowTest {
           assertTrue(
               said(window, ".said.wrong .first").startsWith("Slot " + slot + " is reversed: "),
               said(window, ".said.wrong .first"));
-          ((Button) window.root().lookup("#bench\\.turned")).fire();
+          ((Button) find(window, "#bench-turned")).fire();
           enter(window, "#reading", gauge.reads("R-9"));
           assertTrue(said(window, ".said.right .first").endsWith("reads as it should."));
         });
