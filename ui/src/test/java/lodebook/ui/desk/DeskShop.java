@@ -207,8 +207,8 @@ public final class DeskShop {
           folder.resolve("lots.csv"),
           """
           lot,type,supplier,received,count,certificate,certificate_br_mT,location
-          L-2501,BLK-4-4-10,Ostmagnet,2026-11-20,60,Z-881,1300,shelf 2
-          L-2502,BLK-5-5-10,Ostmagnet,2026-11-27,200,Z-902,1300,shelf 3
+          L-2501,BLK-4-4-10,Hollow Lane Magnetics (invented),2026-11-20,60,Z-881,1300,shelf 2
+          L-2502,BLK-5-5-10,Hollow Lane Magnetics (invented),2026-11-27,200,Z-902,1300,shelf 3
           """);
       does(folder, clock, "lot", "import", folder.resolve("lots.csv").toString());
       write(folder.resolve("pieces.csv"), pieces(60));

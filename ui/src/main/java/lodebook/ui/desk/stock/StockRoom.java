@@ -17,11 +17,8 @@ import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import lodebook.assembly.magnet.Strength;
 import lodebook.db.stock.Lot;
-import lodebook.db.stock.LotState;
 import lodebook.db.stock.Piece;
-import lodebook.db.stock.PieceReading;
 import lodebook.db.stock.PieceState;
-import lodebook.db.stock.StateChange;
 import lodebook.ui.desk.look.Look;
 import lodebook.ui.desk.room.Doors;
 import lodebook.ui.desk.room.FileDrop;
@@ -44,6 +41,8 @@ public final class StockRoom implements Room {
   private final StackPane ground = new StackPane();
   private final Question question = new Question(ground);
   private final HistogramView histogram;
+  private final StockWords stockWords;
+  private final PieceSheets sheets;
   private final Node slip;
 
   /// @param model what lies there
@@ -54,6 +53,8 @@ public final class StockRoom implements Room {
     this.words = model.words();
     this.doors = doors;
     this.histogram = new HistogramView(words, look);
+    this.stockWords = new StockWords(words);
+    this.sheets = new PieceSheets(words, model::open);
     ScrollPane scroll = new ScrollPane(new Slip(model.said()));
     scroll.setFitToWidth(true);
     scroll.setMaxHeight(SLIP_HEIGHT);
@@ -136,7 +137,9 @@ public final class StockRoom implements Room {
     TableView<Lot> sheet = Sheets.sheet(words.say("stock.no-lot"), lot -> model.open(lot.code()));
     sheet.getColumns().add(Sheets.words(words.say("stock.lot"), 120, Lot::code));
     sheet.getColumns().add(Sheets.words(words.say("stock.type"), 130, l -> l.received().type()));
-    sheet.getColumns().add(Sheets.words(words.say("stock.state"), 150, l -> lotState(l.state())));
+    sheet
+        .getColumns()
+        .add(Sheets.words(words.say("stock.state"), 150, l -> stockWords.lotState(l.state())));
     sheet
         .getColumns()
         .add(
@@ -175,10 +178,6 @@ public final class StockRoom implements Room {
 
   private String whole(Double figure) {
     return words.number(Math.round(figure));
-  }
-
-  private String lotState(LotState state) {
-    return words.say("lot." + state.word());
   }
 
   private void choose(String title) {
@@ -224,93 +223,23 @@ public final class StockRoom implements Room {
             lot.received().certificate());
     histogram.show(page);
     VBox story =
-        new VBox(3, Keys.words(facts), Keys.words(origin, "quiet"), decisions(page.decisions()));
+        new VBox(
+            3,
+            Keys.words(facts),
+            Keys.words(origin, "quiet"),
+            stockWords.decisions(page.decisions()));
     Node spread =
         lot.measured() == 0 ? Keys.words(words.say("stock.none-measured"), "quiet") : histogram;
-    TableView<Piece> pieces = pieces(page.pieces());
+    TableView<Piece> pieces = sheets.of(page.pieces());
     VBox.setVgrow(pieces, Priority.ALWAYS);
     FlowPane row = new FlowPane(8, 8);
     row.getChildren().addAll(keys);
     return page(
-        head(words.say("stock.lot-title", code, lotState(lot.state())), true),
+        head(words.say("stock.lot-title", code, stockWords.lotState(lot.state())), true),
         row,
         story,
         spread,
         pieces);
-  }
-
-  private TableView<Piece> pieces(List<Piece> all) {
-    TableView<Piece> sheet =
-        Sheets.sheet(words.say("stock.no-piece"), p -> model.open(p.name().toString()));
-    sheet.getColumns().add(Sheets.words(words.say("stock.piece"), 120, p -> p.name().toString()));
-    sheet.getColumns().add(Sheets.words(words.say("stock.state"), 110, this::pieceState));
-    sheet
-        .getColumns()
-        .add(
-            Sheets.figures(
-                words.say("stock.br"),
-                110,
-                p -> tesla(p.strength()),
-                t -> Double.isNaN(t) ? "" : words.milliTesla(t)));
-    sheet
-        .getColumns()
-        .add(
-            Sheets.figures(
-                words.say("stock.doubt"),
-                80,
-                p -> doubt(p.strength()),
-                t -> Double.isNaN(t) ? "" : words.milliTesla(t)));
-    sheet.getColumns().add(Sheets.words(words.say("stock.where"), 260, this::where));
-    sheet.getItems().setAll(all);
-    sheet.setMinHeight(120);
-    return sheet;
-  }
-
-  private static double tesla(@Nullable Strength strength) {
-    return strength == null ? Double.NaN : strength.remanenceTesla();
-  }
-
-  private static double doubt(@Nullable Strength strength) {
-    return strength == null ? Double.NaN : strength.standardUncertaintyTesla();
-  }
-
-  private String pieceState(Piece piece) {
-    return words.say("piece." + piece.state().word());
-  }
-
-  private String where(Piece piece) {
-    Piece.Slot stands = piece.stands();
-    Piece.Cell lies = piece.lies();
-    Piece.Slot planned = piece.planned();
-    if (stands != null) {
-      return words.say("stock.stands", stands.rotor(), words.number(stands.slot()));
-    }
-    String cell = lies == null ? "" : words.say("stock.cell", lies.tray(), lies.cell());
-    return planned == null
-        ? cell
-        : words.say("stock.planned", cell, planned.rotor(), words.number(planned.slot()));
-  }
-
-  private Label decisions(List<StateChange> decisions) {
-    if (decisions.isEmpty()) {
-      return Keys.words(words.say("stock.undecided"), "quiet");
-    }
-    StateChange last = decisions.getLast();
-    return Keys.words(
-        words.say(
-            "stock.decided",
-            state(last.state()),
-            words.minute(last.statedAt()),
-            last.by(),
-            last.why()),
-        "quiet");
-  }
-
-  private String state(String word) {
-    return switch (word) {
-      case "usable", "scrapped" -> words.say("piece." + word);
-      default -> words.say("lot." + word);
-    };
   }
 
   private Node decision(String key, String code, Decision decision, String... styles) {
@@ -377,29 +306,16 @@ public final class StockRoom implements Room {
                 words.milliTesla(strength.standardUncertaintyTesla()));
     Label large = Keys.words(br, "title");
     VBox story =
-        new VBox(6, large, Keys.words(where(piece)), decisions(page.decisions()), readings(page));
-    return page(head(words.say("stock.piece-title", code, pieceState(piece)), true), keys, story);
-  }
-
-  private Node readings(StockPage.OnePiece page) {
-    VBox rows = new VBox();
-    rows.getStyleClass().add("rows");
-    for (PieceReading reading : page.readings()) {
-      String meter = reading.meter();
-      Label row =
-          Keys.words(
-              words.say(
-                  reading.doubted() ? "stock.reading.doubted" : "stock.reading",
-                  words.milliTesla(reading.fluxTesla()),
-                  words.number(reading.standoffMetres() * 1e3, 2),
-                  meter == null ? words.say("stock.no-meter") : meter,
-                  reading.by(),
-                  words.minute(reading.statedAt())));
-      HBox line = new HBox(row);
-      line.getStyleClass().add("row");
-      rows.getChildren().add(line);
-    }
-    return rows;
+        new VBox(
+            6,
+            large,
+            Keys.words(stockWords.where(piece)),
+            stockWords.decisions(page.decisions()),
+            sheets.readings(page));
+    return page(
+        head(words.say("stock.piece-title", code, stockWords.pieceState(piece)), true),
+        keys,
+        story);
   }
 
   private Node tray(StockPage.OneTray page) {

@@ -104,7 +104,7 @@ final class TrayView {
         Keys.key(
             content.cell() + "   " + content.piece().number() + "\n" + read + state,
             () -> opened.accept(content.piece().toString()),
-            "cell");
+            "tray-cell");
     cell.setPrefWidth(WIDTH);
     cell.setMinHeight(62);
     return cell;

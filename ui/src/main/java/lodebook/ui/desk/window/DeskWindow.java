@@ -93,6 +93,8 @@ public final class DeskWindow {
   /// Opens the first room, asks who is here, and begins to look for others' changes.
   public void begin() {
     if (FirstStart.needed(station.address())) {
+      doors.values().forEach(door -> door.setDisable(true));
+      number.setDisable(true);
       middle.getChildren().setAll(new FirstStart(station, runner).page(this::bookIsThere));
       return;
     }
@@ -100,6 +102,8 @@ public final class DeskWindow {
   }
 
   private void bookIsThere() {
+    doors.values().forEach(door -> door.setDisable(false));
+    number.setDisable(false);
     open(rooms.keySet().iterator().next(), null);
     if (station.who().get() == null) {
       askWho();
