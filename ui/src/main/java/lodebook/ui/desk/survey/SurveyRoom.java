@@ -99,6 +99,7 @@ public final class SurveyRoom implements Room {
       model.open(code);
     } else if (model.round().get() == null) {
       model.offer();
+      show();
     }
   }
 

@@ -119,8 +119,12 @@ public final class TraceRoom implements Room {
     }
     Instant to = node.to();
     return to == null
-        ? words.say("trace.since", text, words.minute(from))
-        : words.say("trace.from-to", text, words.minute(from), words.minute(to));
+        ? words.say("trace.since", text, day(from))
+        : words.say("trace.from-to", text, day(from), day(to));
+  }
+
+  private String day(Instant time) {
+    return words.day(words.dayOf(time));
   }
 
   private String kind(String kind) {
