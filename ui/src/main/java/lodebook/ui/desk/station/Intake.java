@@ -5,7 +5,7 @@ import java.util.List;
 import lodebook.db.refusal.RowsRefused;
 import lodebook.db.refusal.Sentences;
 import lodebook.ui.files.BadFile;
-import lodebook.ui.files.Rows;
+import lodebook.ui.files.Placed;
 import lodebook.ui.files.Source;
 
 /// Takes the shop's files in: all rows or none, every problem at its line and column.
@@ -28,15 +28,15 @@ public final class Intake {
   /// the file.
   ///
   /// @throws BadFile where the book refuses rows; nothing is changed then
-  public void take(Rows<?> rows, Runnable work) {
+  public void take(Placed rows, Runnable work) {
     try {
       work.run();
     } catch (RowsRefused refused) {
       Sentences sentences = Sentences.in(station.words().locale());
-      List<Rows.RowFault> faults =
+      List<Placed.Fault> faults =
           refused.problems().stream()
               .limit(BadFile.SHOWN)
-              .map(p -> new Rows.RowFault(p.row(), p.column(), sentences.say(p.refusal())))
+              .map(p -> new Placed.Fault(p.row(), p.column(), sentences.say(p.refusal())))
               .toList();
       throw new BadFile(rows.problems(faults), refused.problems().size());
     }

@@ -104,6 +104,11 @@ public final class TraceRoom implements Room {
   }
 
   private final class ThingCell extends TreeCell<TraceNode> {
+    ThingCell() {
+      setWrapText(true);
+      setPrefWidth(0);
+    }
+
     @Override
     protected void updateItem(TraceNode item, boolean empty) {
       super.updateItem(item, empty);
@@ -112,7 +117,10 @@ public final class TraceRoom implements Room {
   }
 
   private String line(TraceNode node) {
-    String text = words.say("trace.thing", node.code(), kind(node.kind()), state(node.state()));
+    String thing = words.say("trace.thing", node.code(), kind(node.kind()), state(node.state()));
+    Integer magnets = node.magnets();
+    String text =
+        magnets == null ? thing : words.say("trace.magnets", thing, words.number(magnets));
     Instant from = node.from();
     if (from == null) {
       return text;
@@ -185,7 +193,7 @@ public final class TraceRoom implements Room {
 
   private static TreeItem<TraceNode> root(List<TraceNode> nodes) {
     TreeItem<TraceNode> root =
-        new TreeItem<>(new TraceNode("", "", null, "", null, null, List.of()));
+        new TreeItem<>(new TraceNode("", "", null, "", null, null, null, List.of()));
     nodes.forEach(n -> root.getChildren().add(item(n, 1)));
     root.setExpanded(true);
     return root;
