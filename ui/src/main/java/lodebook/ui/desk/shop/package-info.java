@@ -1,0 +1,5 @@
+/// People, meters, the shop's name, backups.
+@NullMarked
+package lodebook.ui.desk.shop;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/// Trying the stockroom.
+@NullMarked
+package lodebook.ui.desk.stock;
+
+import org.jspecify.annotations.NullMarked;
