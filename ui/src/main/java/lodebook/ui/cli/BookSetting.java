@@ -20,7 +20,7 @@ import picocli.CommandLine.Parameters;
     },
     footer = {
       "",
-      "Examples:",
+      "Example:",
       "  lodebook book setting shop \"Workshop by the river\"",
       "  lodebook book setting prior-missing 0.005"
     })

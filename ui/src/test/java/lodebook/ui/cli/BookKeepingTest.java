@@ -192,7 +192,7 @@ class BookKeepingTest {
         4,
         "",
         """
-        lodebook: there is no setting colour; there are name and shop
+        lodebook: there is no setting colour; there are name, shop and the odds of a survey (prior-reversed and so on)
         try: lodebook help book setting
         """,
         "book",

@@ -9,8 +9,11 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.api.parallel.Execution;
+import org.junit.jupiter.api.parallel.ExecutionMode;
 
 /// A book that another process keeps open.
+@Execution(ExecutionMode.CONCURRENT)
 class BusyTest {
   @TempDir Path folder;
 
@@ -29,7 +32,8 @@ class BusyTest {
               5,
               "",
               "lodebook: the book at lodebook/book is busy with piece import (station BENCH-2,"
-                  + " process %d); try again in a moment\n".formatted(holder.pid())),
+                  + " process %d); try again in a moment\ntry: lodebook book info\n"
+                      .formatted(holder.pid())),
           waited);
       assertTrue(seconds >= 10, seconds + " s");
       assertTrue(holder.isAlive());

@@ -16,10 +16,13 @@ import java.util.Random;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.api.parallel.Execution;
+import org.junit.jupiter.api.parallel.ExecutionMode;
 
 /// Nothing is lost: the program is killed (SIGKILL) at random moments of its writing commands.
 /// After each kill the book opens and is whole, the command is wholly there or wholly absent, and
 /// there if it had answered; if absent, the same command is done now.
+@Execution(ExecutionMode.CONCURRENT)
 class KillTest {
   private static final int KILLED = 128 + 9;
   private static final List<Kill> TURNS = List.of(Kill.OPEN, Kill.ANSWERED, Kill.ANY, Kill.OPEN);

@@ -19,9 +19,12 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.api.parallel.Execution;
+import org.junit.jupiter.api.parallel.ExecutionMode;
 
 /// Several processes at one embedded book at once: they take turns, one wins what only one can
 /// have, and nothing is lost.
+@Execution(ExecutionMode.CONCURRENT)
 class RaceTest {
   private static final int RACERS = 8;
 
