@@ -60,6 +60,13 @@ public record Diagnosis(
         List.of());
   }
 
+  /// Whether the ring passes only if pockets are filled that would read nearly the same empty:
+  /// [#measureNext] asks to look into them.
+  public boolean passesIfPocketsAreFilled() {
+    return verdict == Verdict.PASS
+        && measureNext.stream().anyMatch(n -> n.why() == MeasureNext.Why.EMPTY_POCKET_ALIKE);
+  }
+
   /// The same where the person measuring did something else.
   Diagnosis measured(Measuring otherwise) {
     return new Diagnosis(

@@ -15,6 +15,7 @@ import lodebook.db.builds.MagnetName;
 import lodebook.db.builds.Plans;
 import lodebook.db.builds.Rotor;
 import lodebook.db.refusal.Refusal;
+import lodebook.ui.craft.BuiltVersion;
 import lodebook.ui.craft.PlanWish;
 import lodebook.ui.craft.Planned;
 import lodebook.ui.craft.PlannedRing;

@@ -63,7 +63,8 @@ final class SurveyWords {
 
   private String verdict(SurveyChecks.Checked checked) {
     Diagnosis diagnosis = checked.diagnosis();
-    String key = "verdict." + diagnosis.reason().name().toLowerCase(Locale.ROOT).replace('_', '-');
+    String reason = diagnosis.reason().name().toLowerCase(Locale.ROOT).replace('_', '-');
+    String key = "verdict." + reason + (diagnosis.passesIfPocketsAreFilled() ? "-if-filled" : "");
     return words.say(key, checked.survey().name(), checked.survey().rotor());
   }
 

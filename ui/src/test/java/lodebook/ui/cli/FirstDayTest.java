@@ -2,8 +2,13 @@ package lodebook.ui.cli;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
+import java.util.function.Predicate;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -12,7 +17,7 @@ class FirstDayTest {
   @TempDir Path folder;
 
   @Test
-  void examplesImportInTheOrderOfTheDay() {
+  void examplesImportInTheOrderOfTheDay() throws IOException {
     Shop shop = new Shop(folder);
     said(shop, "a new book is at lodebook/book\n", "book", "create");
     said(
@@ -73,6 +78,30 @@ class FirstDayTest {
     takeIn(shop, "rotor R-0001: 12 slots recorded, 12 of 12 filled\n", "p.csv", "place", "R-0001");
     takeIn(shop, "S-1\n", "s.csv", "survey", "import", "R-0001", "--meter", "GM-1");
     said(shop, "S-1: rotor R-0001 PASSES; every magnet is shown right\n", "survey", "check", "S-1");
+    reads(shop, "S-2", line -> line.contains(",radial,"));
+    judged(
+        shop, "S-2", 0, "S-2: rotor R-0001 PASSES, provided that no pocket named below is empty");
+    reads(shop, "S-3", line -> Integer.parseInt(line.substring(0, line.indexOf(','))) <= 6);
+    judged(
+        shop,
+        "S-3",
+        1,
+        "S-3: CANNOT TELL about rotor R-0001; what was read looks right, but does not show every");
+  }
+
+  /// Takes in some of the example's readings.
+  private void reads(Shop shop, String survey, Predicate<String> taken) throws IOException {
+    List<String> lines = Files.readAllLines(folder.resolve("s.csv"));
+    List<String> some = new ArrayList<>(List.of(lines.getFirst()));
+    lines.stream().skip(1).filter(taken).forEach(some::add);
+    Path file = Files.write(folder.resolve(survey + ".csv"), some);
+    said(shop, survey + "\n", "survey", "import", "R-0001", file.toString(), "--meter", "GM-1");
+  }
+
+  private static void judged(Shop shop, String survey, int code, String firstLine) {
+    Shop.Said said = shop.run("survey", "check", survey);
+    assertEquals(code, said.code());
+    assertEquals(firstLine, said.out().lines().findFirst().orElse(""));
   }
 
   private static void said(Shop shop, String expected, String... command) {

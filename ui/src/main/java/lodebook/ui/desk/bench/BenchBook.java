@@ -38,6 +38,7 @@ import lodebook.db.surveys.Survey;
 import lodebook.db.surveys.SurveyChecks;
 import lodebook.db.surveys.SurveyRow;
 import lodebook.db.surveys.Surveys;
+import lodebook.ui.craft.BuiltVersion;
 import lodebook.ui.craft.PlanWish;
 import lodebook.ui.craft.Planning;
 import lodebook.ui.desk.station.Station;
@@ -46,7 +47,6 @@ import org.jspecify.annotations.Nullable;
 
 /// What the bench does to the book; slow enough to be done away from the screen's thread.
 final class BenchBook {
-  private static final String VERSION = "0.1.0";
 
   /// A reading further off than three standard deviations is looked into; a band is two of them.
   private static final double DOUBTFUL_BANDS = 1.5;
@@ -267,8 +267,9 @@ final class BenchBook {
   /// Plans the empty slots of a rotor anew from some lots.
   BenchLoad planAnew(String rotor, List<String> lots) {
     StepRemarks remarks = new StepRemarks(station.words());
-    new Planning(station::open, remarks::of, VERSION)
-        .plan(station.act(), new PlanWish(List.of(rotor), lots, MixPolicy.FEW, 1, null));
+    PlanWish wish =
+        new PlanWish(List.of(rotor), lots, MixPolicy.FEW, List.of(), Map.of(), Set.of(), 1, null);
+    new Planning(station::open, remarks, BuiltVersion.text(), _ -> {}).plan(station.act(), wish);
     return load(rotor);
   }
 }

@@ -1,12 +1,14 @@
 package lodebook.ui.desk.words;
 
 import java.util.Locale;
+import lodebook.assembly.layout.Layout;
 import lodebook.assembly.plan.FillingStep;
 import lodebook.assembly.plan.Wall;
+import lodebook.ui.craft.StepWords;
 import org.jspecify.annotations.Nullable;
 
 /// What a builder is told about a magnet going in, for plans that are made at the desk.
-public final class StepRemarks {
+public final class StepRemarks implements StepWords {
   private final DeskWords words;
 
   /// Remarks in a language.
@@ -14,8 +16,8 @@ public final class StepRemarks {
     this.words = words;
   }
 
-  /// The words for one step.
-  public String of(FillingStep step) {
+  @Override
+  public String of(Layout layout, FillingStep step) {
     Wall wall = step.wall();
     String lift = words.number(Math.max(0, step.force().pushOutNewtons()), 1);
     return switch (step.behaviour()) {

@@ -38,7 +38,8 @@ public final class SurveySentences {
 
   /// The verdict in one sentence.
   public String verdict(Diagnosis diagnosis, String rotor) {
-    return words.say("verdict." + key(diagnosis.reason().name()), rotor);
+    String open = diagnosis.passesIfPocketsAreFilled() ? "-if-filled" : "";
+    return words.say("verdict." + key(diagnosis.reason().name()) + open, rotor);
   }
 
   /// What is wrong with a slot, in one sentence.

@@ -1,4 +1,4 @@
-package lodebook.ui.cli;
+package lodebook.ui.craft;
 
 import java.io.IOException;
 import java.io.InputStream;
@@ -6,11 +6,11 @@ import java.io.UncheckedIOException;
 import java.util.Properties;
 
 /// The version of this program, which the build wrote beside its classes.
-final class BuiltVersion {
+public final class BuiltVersion {
   private BuiltVersion() {}
 
   /// Such as `0.1.0`.
-  static String text() {
+  public static String text() {
     try (InputStream in = BuiltVersion.class.getResourceAsStream("/lodebook/ui/build.properties")) {
       if (in == null) {
         throw new IllegalStateException("the build wrote no version");
