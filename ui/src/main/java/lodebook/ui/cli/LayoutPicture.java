@@ -31,7 +31,7 @@ import picocli.CommandLine.Parameters;
     },
     footer = {
       "",
-      "Examples:",
+      "Example:",
       "  lodebook layout picture STIR-IN --kind ring -o ring.png",
       "  lodebook layout picture R-0001 --kind film -o film.pdf"
     })

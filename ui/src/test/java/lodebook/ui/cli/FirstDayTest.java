@@ -86,7 +86,7 @@ class FirstDayTest {
         shop,
         "S-3",
         1,
-        "S-3: CANNOT TELL about rotor R-0001; what was read looks right, but does not show every");
+        "S-3: CANNOT TELL about rotor R-0001; what was read looks right, but does not");
   }
 
   /// Takes in some of the example's readings.
