@@ -106,30 +106,6 @@ public final class Samples {
         0.03);
   }
 
-  /// The same layout with other numbering and place of slot 1.
-  public static Layout numbered(Layout l, Numbering numbering, double firstClockDegrees) {
-    return new Layout(
-        l.code(),
-        l.revision(),
-        l.polePairs(),
-        l.segmentsPerPolePair(),
-        l.focus(),
-        numbering,
-        firstClockDegrees,
-        l.firstFacing(),
-        l.slotRadiusMetres(),
-        l.magnetType(),
-        l.sideMagnetType(),
-        l.workingRadiusMetres(),
-        l.probe(),
-        l.spread(),
-        l.adhesive(),
-        l.adhesiveWorkingMinutes(),
-        l.bodyTurns(),
-        l.insertFrom(),
-        l.workingAmplitudeTolerance());
-  }
-
   /// Facts of a sheet on A4 in English.
   public static SheetFacts facts(String code) {
     return new SheetFacts(

@@ -101,6 +101,32 @@ public record Layout(
     return code + "@" + revision;
   }
 
+  /// The same layout with other numbering and place of slot 1.
+  ///
+  /// @param firstClockDegrees clock angle of slot 1, 0 to below 360
+  public Layout numbered(Numbering other, double firstClockDegrees) {
+    return new Layout(
+        code,
+        revision,
+        polePairs,
+        segmentsPerPolePair,
+        focus,
+        other,
+        firstClockDegrees,
+        firstFacing,
+        slotRadiusMetres,
+        magnetType,
+        sideMagnetType,
+        workingRadiusMetres,
+        probe,
+        spread,
+        adhesive,
+        adhesiveWorkingMinutes,
+        bodyTurns,
+        insertFrom,
+        workingAmplitudeTolerance);
+  }
+
   /// The same layout with its magnets at another distance from the axis, metres.
   Layout withSlotRadius(double metres) {
     return new Layout(

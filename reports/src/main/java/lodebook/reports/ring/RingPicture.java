@@ -94,6 +94,11 @@ public record RingPicture(
         layout, type, sideType, title, slots, face, highlighted, shown, language);
   }
 
+  /// Where slots stand in the picture.
+  public RingView view() {
+    return new RingView(layout, face);
+  }
+
   /// The magnet type that stands in a slot.
   MagnetType typeAt(int slot) {
     return sideType != null && layout.liesAlong(slot) ? sideType : type;

@@ -11,9 +11,9 @@ import lodebook.assembly.layout.Numbering;
 ///
 /// @param layout the ring
 /// @param face the face looked at
-record RingView(Layout layout, Face face) {
+public record RingView(Layout layout, Face face) {
   /// +1 where slot numbers rise clockwise in the picture, −1 where they rise the other way.
-  int sense() {
+  public int sense() {
     boolean clockwise = layout.numbering() == Numbering.CLOCKWISE;
     return clockwise == (face == Face.MARKED) ? 1 : -1;
   }
@@ -21,7 +21,7 @@ record RingView(Layout layout, Face face) {
   /// Clock angle, radians from 12 o'clock clockwise in the picture, of a place between slots.
   ///
   /// @param slot slot number; 2.5 stands midway between slots 2 and 3
-  double clockRadians(double slot) {
+  public double clockRadians(double slot) {
     double first = Math.toRadians(layout.firstSlotClockDegrees());
     double onward = 2 * Math.PI * (slot - 1) / layout.slots();
     return (face == Face.MARKED ? first : -first) + sense() * onward;

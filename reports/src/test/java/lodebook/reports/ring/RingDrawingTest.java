@@ -54,7 +54,7 @@ final class RingDrawingTest {
           """)
   void northStandsWhereTheFacingSays(
       Numbering numbering, Face face, double slotClockDegrees, int sense) {
-    Layout layout = Samples.numbered(Samples.layout(3, 4, Focus.OUT, 10, 13, true), numbering, 90);
+    Layout layout = Samples.layout(3, 4, Focus.OUT, 10, 13, true).numbered(numbering, 90);
     for (double facing = 0; facing < 360; facing += 15) {
       RingPicture picture = oneFacing(layout, block, new Facing(facing), face);
       RingDrawing drawing = RingDrawing.fitting(picture, typeface, 120, 140);

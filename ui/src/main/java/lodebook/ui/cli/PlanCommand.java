@@ -16,11 +16,13 @@ import lodebook.db.builds.Plans;
 import lodebook.db.builds.Rotor;
 import lodebook.db.refusal.Refusal;
 import lodebook.ui.craft.BuiltVersion;
+import lodebook.ui.craft.FillWords;
 import lodebook.ui.craft.PlanWish;
 import lodebook.ui.craft.Planned;
 import lodebook.ui.craft.PlannedRing;
 import lodebook.ui.craft.Planning;
 import lodebook.ui.craft.WhatIf;
+import lodebook.ui.words.Amounts;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -159,7 +161,7 @@ final class PlanCommand extends Verb {
     Planning planning =
         new Planning(
             session::opened,
-            new FillWords(session.words()),
+            new FillWords(session.words()::say, force -> Amounts.fixed(force, 1)),
             BuiltVersion.text(),
             new PlanProgress(session, progress));
     boolean several = batch != null || wanted.size() > 1;

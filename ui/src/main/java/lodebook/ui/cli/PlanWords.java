@@ -3,9 +3,11 @@ package lodebook.ui.cli;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
 import lodebook.assembly.layout.Layout;
+import lodebook.assembly.plan.OrderPattern;
 import lodebook.assembly.plan.RotorPlan;
 import lodebook.db.builds.MagnetName;
 import lodebook.db.builds.Plan;
@@ -53,7 +55,10 @@ final class PlanWords {
   /// How the order of filling goes, for the slots of the plan.
   String order(PlannedRing ring) {
     List<Integer> filled = inOrder(ring.plan()).stream().map(PlannedSlot::slot).toList();
-    return new FillWords(words).pattern(filled, ring.design().slots());
+    OrderPattern pattern = OrderPattern.of(filled, ring.design().slots());
+    return pattern == null
+        ? words.say("fill.by-table")
+        : words.say("fill.pattern." + pattern.name().toLowerCase(Locale.ROOT).replace('_', '-'));
   }
 
   /// A sentence for each piece that may not be placed any more.

@@ -1,25 +1,33 @@
-package lodebook.ui.cli;
+package lodebook.ui.craft;
 
-import java.util.List;
 import java.util.Locale;
+import java.util.function.DoubleFunction;
 import lodebook.assembly.layout.Layout;
 import lodebook.assembly.plan.FillingOrder;
 import lodebook.assembly.plan.FillingStep;
-import lodebook.assembly.plan.OrderPattern;
 import lodebook.assembly.plan.SlotForce;
 import lodebook.assembly.plan.Wall;
-import lodebook.ui.craft.StepWords;
-import lodebook.ui.words.Amounts;
-import lodebook.ui.words.Words;
 import org.jspecify.annotations.Nullable;
 
 /// What a builder is told about a magnet going in: on which wall it presses, whether it is pushed
-/// out and where to hold it then, which neighbour must be held as well.
-final class FillWords implements StepWords {
-  private final Words words;
+/// out and where to hold it then, which neighbour must be held as well. Both faces say it alike,
+/// each from its own bundle.
+public final class FillWords implements StepWords {
+  private final Sayings words;
+  private final DoubleFunction<String> newtons;
 
-  FillWords(Words words) {
+  /// The sentences of a face.
+  @FunctionalInterface
+  public interface Sayings {
+    /// The sentence of a key, with its places filled.
+    String say(String key, Object... arguments);
+  }
+
+  /// @param words the sentences
+  /// @param newtons how a force is written
+  public FillWords(Sayings words, DoubleFunction<String> newtons) {
     this.words = words;
+    this.newtons = newtons;
   }
 
   @Override
@@ -28,7 +36,8 @@ final class FillWords implements StepWords {
     for (SlotForce neighbour : step.neighbours()) {
       if (neighbour.pushOutNewtons() > FillingOrder.NOT_WORTH_A_WORD) {
         text.append(
-            words.say("fill.neighbour", neighbour.slot(), newtons(neighbour.pushOutNewtons())));
+            words.say(
+                "fill.neighbour", neighbour.slot(), newtons.apply(neighbour.pushOutNewtons())));
       }
     }
     return text.toString();
@@ -37,7 +46,7 @@ final class FillWords implements StepWords {
   private String itself(Layout layout, FillingStep step) {
     Wall wall = step.wall();
     String hold = words.say("fill.hold." + layout.insertFrom().name().toLowerCase(Locale.ROOT));
-    String lift = newtons(Math.max(0, step.force().pushOutNewtons()));
+    String lift = newtons.apply(Math.max(0, step.force().pushOutNewtons()));
     return switch (step.behaviour()) {
       case HOLDS -> words.say("fill.holds");
       case PRESSES -> words.say("fill.presses", wall(wall), press(step));
@@ -52,26 +61,12 @@ final class FillWords implements StepWords {
     return wall == null ? "" : words.say("wall." + wall.name().toLowerCase(Locale.ROOT));
   }
 
-  private static String press(FillingStep step) {
+  private String press(FillingStep step) {
     Wall wall = step.wall();
     double force =
         wall == Wall.OUTER || wall == Wall.INNER
             ? step.force().radialNewtons()
             : step.force().tangentialNewtons();
-    return newtons(Math.abs(force));
-  }
-
-  private static String newtons(double force) {
-    return Amounts.fixed(force, 1);
-  }
-
-  /// How the order of filling goes, such as every second slot first.
-  ///
-  /// @param filled slots in the order in which they are filled
-  String pattern(List<Integer> filled, int slots) {
-    OrderPattern pattern = OrderPattern.of(filled, slots);
-    return pattern == null
-        ? words.say("fill.by-table")
-        : words.say("fill.pattern." + pattern.name().toLowerCase(Locale.ROOT).replace('_', '-'));
+    return newtons.apply(Math.abs(force));
   }
 }

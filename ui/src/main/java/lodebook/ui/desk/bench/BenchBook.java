@@ -39,10 +39,11 @@ import lodebook.db.surveys.SurveyChecks;
 import lodebook.db.surveys.SurveyRow;
 import lodebook.db.surveys.Surveys;
 import lodebook.ui.craft.BuiltVersion;
+import lodebook.ui.craft.FillWords;
 import lodebook.ui.craft.PlanWish;
 import lodebook.ui.craft.Planning;
 import lodebook.ui.desk.station.Station;
-import lodebook.ui.desk.words.StepRemarks;
+import lodebook.ui.desk.words.DeskWords;
 import org.jspecify.annotations.Nullable;
 
 /// What the bench does to the book; slow enough to be done away from the screen's thread.
@@ -266,7 +267,8 @@ final class BenchBook {
 
   /// Plans the empty slots of a rotor anew from some lots.
   BenchLoad planAnew(String rotor, List<String> lots) {
-    StepRemarks remarks = new StepRemarks(station.words());
+    DeskWords words = station.words();
+    FillWords remarks = new FillWords(words::say, force -> words.number(force, 1));
     PlanWish wish =
         new PlanWish(List.of(rotor), lots, MixPolicy.FEW, List.of(), Map.of(), Set.of(), 1, null);
     new Planning(station::open, remarks, BuiltVersion.text(), _ -> {}).plan(station.act(), wish);

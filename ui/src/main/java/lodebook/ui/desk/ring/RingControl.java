@@ -170,7 +170,7 @@ public final class RingControl extends Region {
     if (middle != null) {
       double free = freeRadius(view, drawing.scale());
       BigMagnet.draw(
-          screen.moved(width / 2, ringRadius(drawing)), free, middle, RingTurn.sense(view));
+          screen.moved(width / 2, ringRadius(drawing)), free, middle, view.view().sense());
     }
   }
 
@@ -236,7 +236,7 @@ public final class RingControl extends Region {
     }
     int slots = view.layout().slots();
     int now = chosen.get() > 0 ? chosen.get() : Math.max(1, top.get());
-    int right = RingTurn.sense(view);
+    int right = view.view().sense();
     switch (event.getCode()) {
       case RIGHT -> choose(Math.floorMod(now - 1 + right, slots) + 1);
       case LEFT -> choose(Math.floorMod(now - 1 - right, slots) + 1);
@@ -257,7 +257,7 @@ public final class RingControl extends Region {
       return words.say("ring.none");
     }
     String face = words.say(view.face() == Face.MARKED ? "ring.face.marked" : "ring.face.other");
-    String way = words.say(RingTurn.sense(view) > 0 ? "ring.way.clockwise" : "ring.way.counter");
+    String way = words.say(view.view().sense() > 0 ? "ring.way.clockwise" : "ring.way.counter");
     String whole =
         words.say("ring.description", view.title(), words.number(view.layout().slots()), face, way);
     Integer slot = view.highlighted();

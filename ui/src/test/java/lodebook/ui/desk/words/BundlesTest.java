@@ -21,15 +21,19 @@ import java.util.TreeSet;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
+import lodebook.assembly.survey.Diagnosis;
 import org.junit.jupiter.api.Test;
 
 /// Both languages say everything, and say nothing that nobody asks for.
 class BundlesTest {
+  private static final Path SAID_BY_BOTH_FACES =
+      Path.of("src/main/java/lodebook/ui/craft/FillWords.java");
   private static final Path SOURCES = Path.of("src/main/java/lodebook/ui/desk");
 
   /// Keys that are put together from a word of the program, by the start they share.
   private static final List<String> PUT_TOGETHER =
       List.of(
+          "fill.hold.",
           "finding.",
           "fault.",
           "kind.",
@@ -44,6 +48,15 @@ class BundlesTest {
           "waiting.",
           "wall.",
           "why.");
+
+  @Test
+  void everyReasonOfAVerdictHasWords() throws IOException {
+    Properties english = bundle("");
+    for (Diagnosis.Reason reason : Diagnosis.Reason.values()) {
+      String key = "verdict." + reason.name().toLowerCase(Locale.ROOT).replace('_', '-');
+      assertTrue(english.containsKey(key), key);
+    }
+  }
 
   private static Properties bundle(String suffix) throws IOException {
     Properties bundle = new Properties();
@@ -85,7 +98,7 @@ class BundlesTest {
   @Test
   void everyKeyIsAskedForAndEveryKeyAskedForIsThere() throws IOException {
     Set<String> keys = new TreeSet<>(bundle("").stringPropertyNames());
-    StringBuilder sources = new StringBuilder();
+    StringBuilder sources = new StringBuilder(Files.readString(SAID_BY_BOTH_FACES));
     try (Stream<Path> files = Files.walk(SOURCES)) {
       for (Path file :
           (Iterable<Path>) files.filter(f -> f.toString().endsWith(".java"))::iterator) {
